@@ -68,6 +68,18 @@ export interface DraftAnswer {
   readonly airframe: Airframe;
 }
 
+/** Answer to a draft save: the version that it became. */
+export interface DraftSaved {
+  readonly designId: string;
+  readonly version: number;
+  readonly savedAt: string;
+  readonly savedBy: string;
+}
+/** A stale save or release: the problem carries the draft that stands now, so that nothing has to be thrown away. */
+export interface StaleDraftProblem extends ProblemDetails {
+  readonly current: DraftAnswer;
+}
+
 export interface RevisionSummary {
   readonly id: string;
   readonly number: number;

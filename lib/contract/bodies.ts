@@ -3,14 +3,31 @@ import { ROLES } from './roles';
 
 // Bodies that the API takes. The same schemas check a form in the browser and the request on the server.
 
-const line = (max: number) =>
+// biome-ignore lint/suspicious/noControlCharactersInRegex: control characters are exactly what is refused
+const CONTROL = /[\u0000-\u001f\u007f]/;
+// biome-ignore lint/suspicious/noControlCharactersInRegex: a paragraph keeps its line breaks and tabs
+const CONTROL_IN_PARAGRAPH = /[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f]/;
+
+const filled = (max: number) =>
   z
     .string()
     .trim()
     .min(1, 'must not be empty')
     .max(max)
     .refine((value) => value.isWellFormed(), 'text must be well-formed Unicode');
-const paragraph = (max: number) => line(max);
+const line = (max: number) =>
+  filled(max).refine((value) => !CONTROL.test(value), 'text must not hold control characters');
+const paragraph = (max: number) =>
+  filled(max).refine((value) => !CONTROL_IN_PARAGRAPH.test(value), 'text must not hold control characters');
+
+/** As a paragraph, but it may be left empty. */
+const remark = (max: number) =>
+  z
+    .string()
+    .trim()
+    .max(max)
+    .refine((value) => value.isWellFormed(), 'text must be well-formed Unicode')
+    .refine((value) => !CONTROL_IN_PARAGRAPH.test(value), 'text must not hold control characters');
 
 export const RoleSet = z
   .array(z.enum(ROLES))
@@ -39,25 +56,35 @@ export const ReleaseRevision = z.strictObject({
 });
 
 export const ANCHOR_KINDS = ['point', 'element', 'part', 'figure', 'sheet', 'rule'] as const;
-export const Anchor = z.strictObject({
-  kind: z.enum(ANCHOR_KINDS),
-  /** Element id, part key, figure id, sheet id or rule id. */
-  key: z.string().min(1).max(200).optional(),
-  view: z.enum(['plan', 'side', 'front', 'parts']).optional(),
-  /** In the view's own axes, aircraft mm. */
-  mm: z.tuple([z.number().min(-20_000).max(20_000), z.number().min(-20_000).max(20_000)]).optional(),
-  /** Share along the element's length and chord, so that a pin follows its element. */
-  shares: z.tuple([z.number().min(-5).max(5), z.number().min(-5).max(5)]).optional(),
-});
+export const Anchor = z
+  .strictObject({
+    kind: z.enum(ANCHOR_KINDS),
+    /** Element id, part key, figure id, sheet id or rule id. */
+    key: line(200).optional(),
+    view: z.enum(['plan', 'side', 'front', 'parts']).optional(),
+    /** In the view's own axes, aircraft mm. */
+    mm: z.tuple([z.number().min(-20_000).max(20_000), z.number().min(-20_000).max(20_000)]).optional(),
+    /** Share along the element's length and chord, so that a pin follows its element. */
+    shares: z.tuple([z.number().min(-5).max(5), z.number().min(-5).max(5)]).optional(),
+  })
+  .refine((anchor) => anchor.kind !== 'point' || (anchor.view !== undefined && anchor.mm !== undefined), {
+    path: ['mm'],
+    message: 'a point needs its view and its place in it',
+  })
+  .refine((anchor) => anchor.kind === 'point' || anchor.key !== undefined, {
+    path: ['key'],
+    message: 'say which element, part, figure, sheet or rule is meant',
+  });
 export type Anchor = z.infer<typeof Anchor>;
 
 export const CreateThread = z.strictObject({ anchor: Anchor, text: paragraph(4000) });
+export const SetThreadState = z.strictObject({ state: z.enum(['open', 'closed']) });
 export const CreateComment = z.strictObject({ text: paragraph(4000) });
 
 export const VERDICTS = ['goodToCut', 'hold', 'seen'] as const;
 export type VerdictKind = (typeof VERDICTS)[number];
 export const GiveVerdict = z
-  .strictObject({ verdict: z.enum(VERDICTS), note: z.string().trim().max(2000).default('') })
+  .strictObject({ verdict: z.enum(VERDICTS), note: remark(2000).default('') })
   .refine((body) => body.verdict !== 'hold' || body.note.length > 0, {
     path: ['note'],
     message: 'say what has to change first',

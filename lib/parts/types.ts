@@ -26,13 +26,23 @@ export interface Operation {
   readonly closed: boolean;
   /** The face it is worked from. */
   readonly face: Face;
-  /** Bevel or fold angle. For a fold: how far the part turns about this line in the assembled aircraft. */
+  /**
+   * Bevel: how far the cut leans from square, so that material leaves the worked face. Fold (crease, cutToPaper): how far
+   * the part turns about this line in the assembled aircraft, about the face that is not worked from; positive when the
+   * worked face closes.
+   */
   readonly angleDeg?: number;
   readonly widthMm?: number;
+  /** How deep it goes from the worked face; absent: as deep as the kind says. */
+  readonly depthMm?: number;
   readonly note?: string;
 }
 
-/** Where the flat part stands in the assembled aircraft: part (x, y) on its mid-plane goes to origin + x ex + y ey. Right-angled, unit length. */
+/**
+ * Where the flat part stands in the assembled aircraft: part (x, y) on its mid-plane goes to origin + x ex + y ey.
+ * Right-angled, unit length; ex x ey points out of the part's `face`. A part with folds: where the piece that holds
+ * `outline[0]` stands.
+ */
 export interface PartFrame {
   readonly origin: Vec3;
   readonly ex: Vec3;
@@ -59,7 +69,7 @@ export interface Part {
   /** Key of the part this one mirrors. */
   readonly mirrorOf?: string;
   readonly face: Face;
-  /** Counter-clockwise, not closed by a repeated point. */
+  /** What is cut square through the sheet: where an edge is bevelled, its longer face. Counter-clockwise, not closed by a repeated point. */
   readonly outline: readonly Vec2[];
   /** Clockwise. */
   readonly holes: readonly (readonly Vec2[])[];

@@ -2,11 +2,11 @@ import { z } from 'zod';
 import { between, type Id, text } from './common';
 import { Drive, Flight, Item, Radio } from './equipment';
 import { Body, Boom, Gear, Joint } from './fuselage';
+import { AIRFRAME_FORMAT, AIRFRAME_VERSION } from './limits';
 import { Build, Covering, Material, Tube } from './stock';
 import { Surface } from './surface';
 
-export const AIRFRAME_FORMAT = 'foldspar.airframe';
-export const AIRFRAME_VERSION = 1;
+export { AIRFRAME_FORMAT, AIRFRAME_VERSION } from './limits';
 
 /** The document's shape. References between elements are checked in `checkReferences`, after the shape holds. */
 export const AirframeShape = z.strictObject({

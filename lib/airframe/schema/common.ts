@@ -1,7 +1,7 @@
 import { z } from 'zod';
+import { MAX_LENGTH_MM } from './limits';
 
-/** The largest length the document holds, mm: ten metres of span is far past any sheet-foam aircraft. */
-export const MAX_LENGTH_MM = 10_000;
+export { MAX_LENGTH_MM } from './limits';
 
 export const Id = z
   .string()

@@ -1,0 +1,105 @@
+import { wingLiftSlope } from '@/lib/aero/liftSlope';
+import { texts } from '@/lib/text/en/figures';
+import { fill } from '@/lib/text/fill';
+import { fixedDigits } from '@/lib/units/number';
+import { HANDBOOK_DIFFERENCE_PCT, TAIL_VOLUME_H, TAIL_VOLUME_V } from './bands';
+import type { SurfaceArea, WingReference } from './reference';
+import type { FigureValue } from './types';
+import { doesNotApply, known, verdictOf } from './value';
+
+const VOLUME_WORDS = {
+  veryLow: texts.verdicts.volumeVerySmall,
+  low: texts.verdicts.volumeSmall,
+  good: texts.verdicts.volumeGood,
+  high: texts.verdicts.volumeLarge,
+  veryHigh: texts.verdicts.volumeVeryLarge,
+};
+
+interface Stabiliser {
+  readonly areaMm2: number;
+  /** Quarter MAC to quarter MAC, weighted by area. */
+  readonly armMm: number;
+}
+
+function together(
+  surfaces: readonly SurfaceArea[],
+  area: (s: SurfaceArea) => number,
+  wing: WingReference,
+): Stabiliser | null {
+  const areaMm2 = surfaces.reduce((sum, s) => sum + area(s), 0);
+  if (!(areaMm2 > 0)) return null;
+  const moment = surfaces.reduce((sum, s) => sum + area(s) * (s.quarterXMm - wing.quarterXMm), 0);
+  return { areaMm2, armMm: moment / areaMm2 };
+}
+
+const isTail = ({ surface }: SurfaceArea) => surface.role === 'tailplane' || surface.role === 'vtail';
+const isFin = ({ surface }: SurfaceArea) =>
+  surface.role === 'fin' || surface.role === 'tipFin' || surface.role === 'vtail';
+
+/** Tailplane, and V-tail by its share seen from above. */
+const tailOf = (surfaces: readonly SurfaceArea[], wing: WingReference) =>
+  together(surfaces.filter(isTail), (s) => s.flatMm2, wing);
+
+const inputsOf = (name: string, { areaMm2, armMm }: Stabiliser) => [
+  { name, value: areaMm2 / 10_000, unit: 'dm²' },
+  { name: texts.inputs.arm, value: armMm, unit: 'mm' },
+];
+
+export function tailVolumeH(surfaces: readonly SurfaceArea[], wing: WingReference): FigureValue {
+  const tail = tailOf(surfaces, wing);
+  if (!tail) return doesNotApply(texts.problems.noTailplane);
+  const volume = (tail.areaMm2 * tail.armMm) / (wing.areaMm2 * wing.macMm);
+  return known(volume, {
+    verdict: verdictOf(volume, TAIL_VOLUME_H, VOLUME_WORDS),
+    inputs: inputsOf(texts.inputs.tailArea, tail),
+  });
+}
+
+export function tailVolumeV(surfaces: readonly SurfaceArea[], wing: WingReference): FigureValue {
+  const fin = together(surfaces.filter(isFin), (s) => s.uprightMm2, wing);
+  if (!fin) return doesNotApply(texts.problems.noFin);
+  const volume = (fin.areaMm2 * fin.armMm) / (wing.areaMm2 * wing.spanMm);
+  return known(volume, {
+    verdict: verdictOf(volume, TAIL_VOLUME_V, VOLUME_WORDS),
+    inputs: inputsOf(texts.inputs.finArea, fin),
+  });
+}
+
+/**
+ * Neutral point by hand, x in mm: h_n = h_ac + V_H (a_t / a_w)(1 - 2 a_w / (pi A)), arms from the wing's aerodynamic centre (Nelson,
+ * "Flight Stability and Automatic Control", ch. 2; slopes by Lowry & Polhamus, NACA TN 3911). Null for a foreplane.
+ */
+export function handbookNeutralPointX(surfaces: readonly SurfaceArea[], wing: WingReference): number | null {
+  if (surfaces.some(({ surface }) => surface.role === 'foreplane')) return null;
+  const tails = surfaces.filter(isTail);
+  const tail = together(tails, (s) => s.flatMm2, wing);
+  if (!tail) return wing.quarterXMm;
+  const wingSlope = wingLiftSlope(wing.aspectRatio, wing.halfChordSweepRad);
+  const area = tails.reduce((sum, s) => sum + s.areaMm2, 0);
+  const spanSquare = tails.reduce((most, s) => Math.max(most, s.spanMm ** 2), 0);
+  const tailSlope = wingLiftSlope(spanSquare / area, 0);
+  const volume = (tail.areaMm2 * tail.armMm) / (wing.areaMm2 * wing.macMm);
+  const share = (tailSlope / wingSlope) * (1 - (2 * wingSlope) / (Math.PI * wing.aspectRatio));
+  return wing.quarterXMm + wing.macMm * volume * share;
+}
+
+/** The simple estimate beside the lattice's, with a note when they are far apart. */
+export function handbookFigure(
+  surfaces: readonly SurfaceArea[],
+  wing: WingReference,
+  latticeX: number | null,
+): FigureValue {
+  const x = handbookNeutralPointX(surfaces, wing);
+  if (x === null) return doesNotApply(texts.problems.foreplaneHandbook);
+  if (latticeX === null) return known(x);
+  const difference = ((x - latticeX) / wing.macMm) * 100;
+  const limit = HANDBOOK_DIFFERENCE_PCT.value;
+  const verdict =
+    Math.abs(difference) > limit
+      ? {
+          level: 'watch' as const,
+          words: fill(texts.verdicts.handbookDiffers, { difference: fixedDigits(difference, 1) }),
+        }
+      : { level: 'good' as const, words: fill(texts.verdicts.handbookAgrees, { limit }) };
+  return known(x, { verdict });
+}

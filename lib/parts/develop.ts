@@ -1,0 +1,65 @@
+import { resolve } from '@/lib/airframe/resolve';
+import type { ResolvedAirframe } from '@/lib/airframe/resolved';
+import type { Airframe } from '@/lib/airframe/schema/airframe';
+import type { Problem } from '@/lib/numerics/result';
+import { length3, sub3 } from '@/lib/numerics/vec';
+import { texts } from '@/lib/text/en/parts';
+import { fill } from '@/lib/text/fill';
+import { bodyParts } from './body/bodyParts';
+import type { BoomHere } from './surface/boom';
+import { tooLong } from './surface/spar';
+import { surfaceParts } from './surface/surfaceParts';
+import type { Development, StockPiece } from './types';
+
+const byId = <T extends { readonly id: string }>(list: readonly T[]): ReadonlyMap<string, T> =>
+  new Map(list.map((entry) => [entry.id, entry]));
+
+function boomPieces(booms: readonly BoomHere[], airframe: Airframe): { pieces: StockPiece[]; problems: Problem[] } {
+  const pieces = booms.map(
+    ({ boom, resolved, tube }): StockPiece => ({
+      key: `${boom.id}/tube`,
+      name: boom.name ?? fill(texts.names.boom, { boom: boom.id }),
+      tubeId: tube.id,
+      lengthMm: length3(sub3(resolved.aft, resolved.fore)),
+      count: boom.mirrored ? 2 : 1,
+      from: resolved.fore,
+      to: resolved.aft,
+    }),
+  );
+  const problems = booms.flatMap(({ boom, tube }) =>
+    tooLong(tube, boom.lengthMm, `booms.${airframe.booms.indexOf(boom)}.lengthMm`),
+  );
+  return { pieces, problems };
+}
+
+/** As `develop`, for a caller that has the resolved airframe already. */
+export function developResolved(airframe: Airframe, resolved: ResolvedAirframe): Development {
+  const stock = { materials: byId(airframe.materials), tubes: byId(airframe.tubes) };
+  const boomsById = byId(airframe.booms);
+  const booms = resolved.booms.flatMap((place): BoomHere[] => {
+    const boom = boomsById.get(place.boomId);
+    const tube = boom && stock.tubes.get(boom.tubeId);
+    return boom && tube ? [{ boom, resolved: place, tube }] : [];
+  });
+  const surfaces = resolved.surfaces.map((surface) => surfaceParts(surface, resolved.controls, stock, booms));
+  const bodies = airframe.bodies.map((body, index) =>
+    bodyParts(body, index, resolved.places.get(body.id)?.at ?? [0, 0, 0], stock.materials),
+  );
+  const { pieces, problems } = boomPieces(booms, airframe);
+  return {
+    parts: [...surfaces, ...bodies].flatMap(({ parts }) => parts),
+    stockPieces: [...surfaces.flatMap(({ stockPieces }) => stockPieces), ...pieces],
+    problems: [...[...surfaces, ...bodies].flatMap((made) => made.problems), ...problems],
+  };
+}
+
+/**
+ * Turns an airframe into flat parts, true size in mm, with every operation on them, and into bought lengths of tube.
+ * Deterministic: the same document gives the same parts in the same order. What cannot be developed yet, or cannot be cut,
+ * is a problem at its path; all other parts still come. A document that does not resolve gives only its problems.
+ */
+export function develop(airframe: Airframe): Development {
+  const resolved = resolve(airframe);
+  if (!resolved.ok) return { parts: [], stockPieces: [], problems: resolved.problems };
+  return developResolved(airframe, resolved.value);
+}

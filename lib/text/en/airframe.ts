@@ -1,0 +1,137 @@
+// What the airframe document says to a person: problems at a field, labels of handles, and why a handle stops.
+
+const problems = {
+  notAnObject: 'the document must be one JSON object, got {got}',
+  tooLarge: 'the document is {sizeMb} MB; the largest that opens is {maxMb} MB',
+  tooDeep: 'the document is nested more than {max} levels deep',
+  emptyText: 'the file is empty',
+  badJson: 'this is not valid JSON: {detail}',
+  badJsonAt: 'this is not valid JSON at line {line}, column {column}',
+  forbiddenKey: 'the key "{key}" is not allowed in a document',
+  notPlainData: 'expected plain data (text, number, true or false, list or object), got {got}',
+  formatMissing: 'the key "format" is missing; an airframe says "format": "{expected}"',
+  formatUnknown: 'unknown format {got}; an airframe says "{expected}"',
+  versionMissing: 'the key "version" is missing; this program reads version {known}',
+  versionUnknown: 'unknown version {got}; this program reads version {known}',
+  versionNewer: 'version {got} is newer than this program, which reads up to version {known}',
+  versionBack: 'a document of version {from} cannot be turned back into version {to}',
+  more: '{count} more problems are not listed; mend these first',
+
+  missing: '"{field}" is missing; expected {expected}',
+  wrongType: '"{field}" must be {expected}, got {got}',
+  notFinite: '"{field}" must be a finite number, got {got}',
+  tooSmall: '"{field}" must be at least {limit}, got {got}',
+  tooBig: '"{field}" must be at most {limit}, got {got}',
+  notWhole: '"{field}" must be a whole number, got {got}',
+  tooFew: '"{field}" needs at least {limit} entries, got {got}',
+  tooMany: '"{field}" takes at most {limit} entries, got {got}',
+  emptyWord: '"{field}" must not be empty',
+  tooLong: '"{field}" takes at most {limit} characters, got {got}',
+  notOneOf: '"{field}" must be {options}, got {got}',
+  badFormat: '"{field}" is not in the form expected: {expected}',
+  badId: '"{field}": {expected}, got {got}',
+  invalid: '"{field}": {detail}',
+  unknownKey: 'unknown key "{key}"{where}',
+  didYouMean: 'did you mean "{key}"?',
+  removeKey: 'remove it; keys known here: {keys}',
+
+  duplicateId: 'the id "{id}" is used twice: here and at {other}',
+  duplicateIdFix: 'give one of them another id; nothing may share an id with its neighbours',
+  reservedId: 'the id "datum" is taken: it means the origin of the aircraft',
+  unknownReference: 'there is no {what} "{id}"',
+  unknownReferenceFix: 'this document has: {known}',
+  noneToRefer: 'this document has no {what} yet; add one first',
+  wrongItemKind: '"{id}" is a {got}, expected a {expected}',
+  jointWithItself: 'a joint needs two different elements, got "{id}" twice',
+  mountLoop: 'the mounts run in a loop: {loop}',
+  mountLoopFix: 'mount one of them to "datum" or to an element outside the loop',
+  unknownMount: 'there is nothing with the id "{to}" to mount on',
+  mountNeedsSurface: 'a place by station and chord share needs a surface, and "{to}" is not one',
+  mountWithoutEnds: '"{to}" has no fore and aft end here',
+
+  controlEndsFirst: 'control "{id}" ends (to {to}) before it begins (from {from})',
+  controlTooShort:
+    'control "{id}" is {length} mm long between its end gaps; the shortest that can be cut and hinged is {min} mm',
+  controlsOverlap: 'controls "{id}" and "{other}" overlap on "{surface}" (from {from} to {to})',
+  controlTooNarrow:
+    'control "{id}" is {chord} mm wide at its {end} end, which is under the {thickness} mm sheet it is cut from',
+  controlLeavesNothing:
+    'control "{id}" leaves {left} mm of fixed surface at its {end} end, which is under the {thickness} mm sheet',
+  hingeBends:
+    'control "{id}" crosses the joint between panels "{inner}" and "{outer}", where its hinge line would bend',
+  hingeBendsFix: 'end the control at the joint (share {station}) or split it in two',
+  chordUnderSheet: '"{field}" is {chord} mm, less than the {thickness} mm sheet it is cut from',
+  spanOverSheet:
+    'panels of {length} mm in {thickness} mm sheet would not hold their shape: {ratio} times the thickness, at most {max} (common practice, no source)',
+  spanOverSheetFix: 'use a sheet of at least {needed} mm or shorten the surface',
+  foreignSide: 'a mirrored "{id}" is stored on the starboard side, but it stands at y = {y} mm',
+  onCentreLine: 'the mirrored "{id}" would stand in its own twin on the centre line (y = {y} mm)',
+  oneSided: '"{id}" has no twin on the other side, so it must stand upright in the centre plane',
+  oneSidedFix: 'set "mirrored" to true',
+  stationsNotRising: 'station "{id}" at x {x} mm does not lie aft of the one before it ({before} mm)',
+  stationUpsideDown: 'station "{id}" has its top ({top} mm) no higher than its bottom ({bottom} mm)',
+  outsideBody: '"{id}" at x {x} mm lies outside the body, which runs from {from} to {to} mm',
+  rangeReversed: '"{id}" ends ({to}) before it begins ({from})',
+  layerReversed: 'a layer ends ({to}) before it begins ({from})',
+  sparMaterial: 'spar "{id}" needs either a tube or a sheet material, and not both',
+  innerOverOuter: 'the bore of tube "{id}" ({inner} mm) is not smaller than its outside ({outer} mm)',
+  facesTooHeavy: 'the faces ({faces} g/m²) cannot weigh more than the whole sheet ({whole} g/m²)',
+  hubTooLarge: 'the hub ({hub} mm) is not smaller than the fan ({fan} mm)',
+  slideReversed: 'the slide ends ({to} mm) before it begins ({from} mm)',
+  slideWithoutPlace: 'the slide must contain the place itself: from {from} to {to} mm does not hold 0',
+  marginReversed: 'the lower static margin ({low} %) is above the upper one ({high} %)',
+} as const;
+
+const handles = {
+  span: 'Span of {element}',
+  panelLength: 'Length of {element}, panel {panel}',
+  rootChord: 'Root chord of {element}, panel {panel}',
+  tipChord: 'Tip chord of {element}, panel {panel}',
+  sweep: 'Sweep of {element}, panel {panel}',
+  boomLength: 'Length of {element}',
+  controlFrom: 'Inner end of {control} on {element}',
+  controlTo: 'Outer end of {control} on {element}',
+  controlChordInner: 'Chord of {control} at its inner end',
+  controlChordOuter: 'Chord of {control} at its outer end',
+  placeX: 'Place of {element}, fore and aft',
+} as const;
+
+const stops = {
+  notANumber: 'a number is needed here',
+  shortest: '{min} mm is the shortest that can be drawn',
+  longest: '{max} mm is the longest a document holds',
+  sheetCarries: 'this sheet holds its shape up to {max} mm (common practice: {ratio} times its thickness)',
+  sheetThickness: 'the sheet is {min} mm thick; a chord under that cannot be cut',
+  sheetSize: 'the largest sheet of {material} is {max} mm long',
+  sweepLimit: 'sweep goes from {min}° to {max}°',
+  stockLength: "the boom's stock length is {max} mm",
+  controlOuterEnd: "the control's outer end is here",
+  controlInnerEnd: "the control's inner end is here",
+  surfaceRoot: "the surface's root is here",
+  surfaceTip: "the surface's tip is here",
+  controlInside: 'control "{other}" ends here',
+  controlOutside: 'control "{other}" begins here',
+  chordShareLimit: 'a control takes from {min} to {max} of the chord here',
+  slideFore: 'the fore end of its slide is here',
+  slideAft: 'the aft end of its slide is here',
+  chordReach: 'a place on a surface reaches from one chord ahead of it to one chord behind',
+  clearOfAircraftFore: 'this is {margin} mm ahead of everything else on the aircraft',
+  clearOfAircraftAft: 'this is {margin} mm behind everything else on the aircraft',
+  rule: '{message}',
+} as const;
+
+const layouts = {
+  trainerName: 'Plain trainer',
+  trainerWhat:
+    'High wing on a box body, tailplane and fin behind it, motor in the nose. The easiest to see and to trim.',
+  pusherName: 'Twin-boom pusher',
+  pusherWhat:
+    'A short pod with the motor behind the wing; two carbon booms carry the tail. The nose is free and the propeller protected.',
+  taillessName: 'Swept tailless',
+  taillessWhat:
+    'One swept wing with elevons and fins at its tips. Few parts; the centre of gravity must be held closely.',
+  deltaName: 'Delta',
+  deltaWhat: 'A pointed planform with elevons and a centre fin. Stiff and quick; it lands nose high.',
+} as const;
+
+export const texts = { problems, handles, stops, layouts } as const;

@@ -1,0 +1,15 @@
+// Names of the lines of the mass list.
+
+export const texts = {
+  covering: '{covering} on {element}',
+  glue: 'Glue on {part}',
+  glueTube: 'Glue along {tube}',
+  glueShare: 'Glue, as a share of the foam',
+  tape: 'Tape on {part}',
+  motor: 'Motor of {drive}',
+  propeller: 'Propeller of {drive}',
+  fan: 'Fan of {drive}',
+  side: '{name}, {side}',
+  stbd: 'starboard',
+  port: 'port',
+} as const;

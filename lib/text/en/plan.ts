@@ -1,0 +1,126 @@
+// What stands on paper: title blocks, legend, cautions, check bars, and what a plan refuses.
+
+const page = {
+  draft: 'DRAFT',
+  draftLong: 'DRAFT: not released, may change',
+  released: 'not yet approved',
+  goodToCut: 'good to cut',
+  held: 'ON HOLD: do not cut',
+  revision: 'revision {number} · {date} · {state}',
+  tile: '{sheet} · row {row} · column {column}',
+  ofPages: 'page {page} of {pages}',
+  bar: '50 mm',
+  trim: 'trim',
+  joinLeft: 'p. {page}',
+  plan: 'Plan of {design}',
+  cover: 'cover',
+  map: 'map',
+} as const;
+
+const sheet = {
+  title: '{material}, {thickness} mm',
+  check: '100 mm',
+  noCheck: 'no room for the 100 mm test square on this sheet',
+  bevelAngle: 'bevel {angle}°',
+  foldAngle: 'fold {angle}°',
+  face: '{face} face up',
+} as const;
+
+const faces = { upper: 'upper', lower: 'lower', inner: 'inner', outer: 'outer' } as const;
+
+const cover = {
+  printTitle: 'Print at 100 %, no fit to page',
+  printWords:
+    'Measure these bars on the print before cutting. If one is off, the driver is resizing: turn off "fit to page" and print this page again.',
+  bar100: '100 mm',
+  bar4in: '4 in (101.6 mm)',
+  figures: 'Estimates',
+  mass: 'All-up mass',
+  cg: 'First-flight CG',
+  cgWhere: 'aft of the leading edge at the body side',
+  stall: 'Stall speed',
+  massUnit: 'g',
+  lengthUnit: 'mm',
+  speedUnit: 'm/s',
+  estimate: 'estimate',
+  band: '{low} to {high}',
+  notKnown: 'not worked out',
+  map: 'Sheets and pages',
+  mapSheet: '{id} · {w} × {h} mm',
+  mapMore: 'map continues on page {page}',
+  legend: 'Lines on the parts',
+  notDrawn: 'Not on these sheets',
+  notDrawnMore: 'and {count} more',
+  joining: 'Joining',
+  joiningWords:
+    'Cut one edge of a pair only, at the "trim" ticks. Lay it over its neighbour until the marks with the same letter meet. Rows first, then row to row.',
+  cautions: 'Before you cut',
+} as const;
+
+const cautions = [
+  'Figures are estimates. Weigh and measure what you build. Fly under local rules and with experienced help.',
+  'Blades: cut away from the hand, a new blade for each sheet.',
+  'Foam dust, sprays and solvent glue: air the room; try a scrap first, some dissolve foam.',
+  'Hot wire and hot glue burn and fume. Never laser-cut vinyl foam.',
+  'Propeller or fan: take it off for every set-up; hands clear of its disc; never launch with fingers behind it.',
+  'Lithium packs: charge attended on something that does not burn; plug in last.',
+] as const;
+
+/** One line of the legend each; what the line asks for, in our own words. */
+const lines = {
+  cut: 'cut through',
+  cutToPaper: 'cut to the far paper, leave it whole',
+  crease: 'crease, do not cut',
+  bevel: 'edge of a bevel',
+  paperOff: 'paper off inside this line',
+  foamOut: 'foam out to the far paper',
+  glue: 'glue here',
+  tape: 'tape here',
+  reference: 'place line, do not cut',
+  register: 'pin through to the other face',
+  sheetEdge: 'edge of the sheet',
+  check: '100 mm test square, in the waste',
+} as const;
+
+const problems = {
+  tooLarge: 'part "{part}" ({w} × {h} mm) is larger than every sheet of its material inside the margins',
+  tooLargeFix: 'list a larger sheet, shorten the part, or split it',
+  noStock: 'part "{part}" needs a sheet of material "{material}", and none of that thickness is listed',
+  noStockFix: 'list a sheet size for this material',
+  noRoom: 'part "{part}" has no room left on {sheets} sheets',
+  noRoomFix: 'add sheets of this material',
+  noParts: 'there is nothing to print: the airframe gave no parts',
+  paperTooSmall:
+    'paper {paper} ({w} × {h} mm) leaves {left} mm to draw in after margins and overlap; at least {min} mm is needed',
+  paperTooSmallFix: 'choose a larger paper or a smaller overlap',
+  badOverlap: 'the overlap must be {min} to {max} mm, got {got}',
+  tooManyPages: 'this plan would take {pages} pages; at most {max} are written',
+  tooManyPagesFix: 'choose a larger paper',
+  unknownPaper: 'unknown paper "{paper}"; known: {known}',
+  strangeLayout: 'the layout places part "{part}", which is not among the parts',
+} as const;
+
+/** What is wrong with a file that is to be printed. */
+const file = {
+  neither: 'expected an airframe ("format": "{format}") or an export with an "airframe" in it',
+  unknownKey: 'unknown key "{key}"; an export holds {known}',
+  badField: '"{path}": {detail}',
+} as const;
+
+/** What the command line says. */
+const cli = {
+  usageFigures: 'usage: npm run --silent figures -- FILE.json',
+  usageSheets: 'usage: npm run --silent sheets -- FILE.json --paper {papers} --out DIR',
+  usage: 'usage: figures FILE.json | sheets FILE.json --paper PAPER --out DIR | job',
+  noFile: 'cannot read {file}: {detail}',
+  noDirectory: 'cannot write to {directory}: {detail}',
+  unknownOption: 'unknown option "{option}"',
+  optionWithoutValue: 'the option "{option}" needs a value',
+  missingOption: 'the option "{option}" is missing',
+  warning: 'not on the sheets: {message}',
+  tooLarge: 'the file is over {max} MB',
+  badJson: 'this is not valid JSON: {detail}',
+  badJob: 'expected a job of kind "freeze" or "plan", got {got}',
+} as const;
+
+export const plan = { page, sheet, faces, cover, cautions, lines, problems, file, cli } as const;
