@@ -20,7 +20,7 @@ export default defineConfig({
         extends: true,
         test: {
           name: 'db',
-          include: ['tests/db/**/*.test.ts'],
+          include: ['tests/db/**/*.test.ts', 'tests/scripts/**/*.test.ts'],
           testTimeout: 60_000,
           hookTimeout: 120_000,
           fileParallelism: false,

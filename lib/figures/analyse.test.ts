@@ -25,7 +25,7 @@ describe('every starting layout', () => {
       const [live, all] = [analyse(document, { depth: 'live' }), full(document)];
       for (const deciding of DECIDING) expect(live.values[deciding]).toEqual(all.values[deciding]);
       expect(live.marks).toEqual(all.marks);
-      expect(live.values.rollHelix).toBeUndefined();
+      expect(live.values.reynoldsMac).toBeUndefined();
     },
   );
 });

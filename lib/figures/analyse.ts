@@ -39,7 +39,7 @@ export function analyse(airframe: Airframe, { depth }: AnalyseOptions): Figures 
     const lost = allMissing(wantedIds(depth), firstProblem(wing));
     return figuresOf(depth, { ...lost, ...weight }, NO_MARKS, masses, wing.problems);
   }
-  const parts = { airframe, resolved: resolved.value, areas, masses, wing: wing.value, depth };
+  const parts = { airframe, resolved: resolved.value, areas, masses, wing: wing.value };
   const lift = liftAbout(parts);
   const stability = lift.ok ? stabilityOf(airframe, wing.value, lift.value, clMaxOf(airframe)) : null;
   const values = {
@@ -47,6 +47,7 @@ export function analyse(airframe: Airframe, { depth }: AnalyseOptions): Figures 
     ...wingFigures(wing.value),
     ...stabilityFigures(parts, lift, stability),
     ...loadings(parts),
+    ...feelFigures(parts, lift, stability),
     ...(depth === 'full' ? fullFigures(parts, lift, stability) : {}),
   };
   const problems = [...sectionProblems(airframe), ...(lift.ok ? [] : lift.problems), ...(stability?.problems ?? [])];
@@ -59,13 +60,12 @@ interface Parts {
   readonly areas: Areas;
   readonly masses: Masses;
   readonly wing: WingReference;
-  readonly depth: AnalyseOptions['depth'];
 }
 
 /** The lattice about the CG, or about the wing's quarter point when there is no CG; the neutral point is the same. */
-function liftAbout({ airframe, resolved, masses, wing, depth }: Parts): Result<Derivatives> {
+function liftAbout({ airframe, resolved, masses, wing }: Parts): Result<Derivatives> {
   const point = masses.balance.ok ? masses.balance.value.cg : ([wing.quarterXMm, 0, 0] as const);
-  return liftOf(airframe, resolved, wing, [point[0], 0, point[2]], depth === 'full' ? 'both' : 'symmetric');
+  return liftOf(airframe, resolved, wing, [point[0], 0, point[2]], 'both');
 }
 
 function massFigures({ balance }: Masses): FigureSet {
@@ -103,25 +103,33 @@ function loadings({ airframe, masses, wing }: Parts): FigureSet {
   return loadingFigures(airframe, wing, balance.value.massG);
 }
 
-function fullFigures(parts: Parts, lift: Result<Derivatives>, stability: Stability | null): FigureSet {
-  const { airframe, areas, wing, masses } = parts;
-  const shape: FigureSet = {
-    tailVolumeH: tailVolumeH(areas.surfaces, wing),
-    tailVolumeV: tailVolumeV(areas.surfaces, wing),
-    neutralPointHandbookXMm: handbookFigure(areas.surfaces, wing, stability?.neutralPointX ?? null),
-    reynoldsMac: reynoldsFigure(airframe, wing),
-  };
-  if (!lift.ok || !stability) {
-    const problem = lift.ok ? needsLattice : firstProblem(lift);
-    return { ...shape, ...allMissing(['liftSlopePerRad', 'pitchPowerPerDeg', 'rollRatePerDeg', 'rollHelix'], problem) };
-  }
+const FEEL_FIGURES = ['pitchPowerPerDeg', 'rollRatePerDeg', 'rollHelix'] as const satisfies readonly FigureId[];
+
+function feelFigures(
+  { airframe, wing, masses }: Parts,
+  lift: Result<Derivatives>,
+  stability: Stability | null,
+): FigureSet {
+  if (!lift.ok || !stability) return allMissing(FEEL_FIGURES, lift.ok ? needsLattice : firstProblem(lift));
   return {
-    ...shape,
-    liftSlopePerRad: known(lift.value.symmetric.alpha.lift),
     pitchPowerPerDeg: masses.balance.ok
       ? pitchFeel(airframe, wing, lift.value, stability, masses.balance.value.massG)
       : missing(firstProblem(masses.balance)),
     ...rollFeel(airframe, wing, lift.value),
+  };
+}
+
+function fullFigures(
+  { airframe, areas, wing }: Parts,
+  lift: Result<Derivatives>,
+  stability: Stability | null,
+): FigureSet {
+  return {
+    tailVolumeH: tailVolumeH(areas.surfaces, wing),
+    tailVolumeV: tailVolumeV(areas.surfaces, wing),
+    neutralPointHandbookXMm: handbookFigure(areas.surfaces, wing, stability?.neutralPointX ?? null),
+    reynoldsMac: reynoldsFigure(airframe, wing),
+    liftSlopePerRad: lift.ok ? known(lift.value.symmetric.alpha.lift) : missing(firstProblem(lift)),
   };
 }
 

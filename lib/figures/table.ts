@@ -71,4 +71,7 @@ export const DECIDING = [
   'allUpMassG',
   'wingLoadingGdm2',
   'stallSpeedMs',
+  'pitchPowerPerDeg',
+  'rollRatePerDeg',
+  'rollHelix',
 ] as const satisfies readonly FigureId[];

@@ -17,12 +17,14 @@ const LATIN =
   'U+0000-00FF,U+0131,U+0152-0153,U+02BB-02BC,U+02C6,U+02DA,U+02DC,U+2000-206F,U+20AC,U+2122,U+2191,U+2193,U+2212,U+2215,U+FEFF,U+FFFD';
 const LATIN_EXTENDED =
   'U+0100-0130,U+0132-0151,U+0154-02BA,U+02BD-02C5,U+02C7-02D9,U+02DB,U+02DD-02FF,U+1E00-1E9F,U+1EF2-1EFF';
+// A full stop as wide as a digit tears a number apart, so the stop and the comma are taken from the text face.
+const FIGURES_RANGE = 'U+0020-002B,U+002D,U+002F-00FF,U+2000-206F,U+2212';
 
 const faces = [
   face('Archivo', 'archivo.woff2', `font-weight:100 900;font-stretch:62% 125%;unicode-range:${LATIN}`),
   face('Archivo', 'archivo-ext.woff2', `font-weight:100 900;font-stretch:62% 125%;unicode-range:${LATIN_EXTENDED}`),
-  face('B612 Mono', 'b612-mono-400.woff2', 'font-weight:400'),
-  face('B612 Mono', 'b612-mono-700.woff2', 'font-weight:700'),
+  face('B612 Mono', 'b612-mono-400.woff2', `font-weight:400;unicode-range:${FIGURES_RANGE}`),
+  face('B612 Mono', 'b612-mono-700.woff2', `font-weight:700;unicode-range:${FIGURES_RANGE}`),
 ].join('');
 
 /** The look a person chose for this browser, or what the device says. */

@@ -378,3 +378,68 @@ describe('what cannot be developed', () => {
     expect(problemsOf({ booms: [boom({ lengthMm: 1000 })] })).toEqual([]);
   });
 });
+
+describe('tips and turning surfaces', () => {
+  const wing = (tip: Airframe['surfaces'][number]['tip']) =>
+    develop(airframe({ surfaces: [surface({ mirrored: false, tip, controls: [control({ to: 1 })] })] }));
+
+  it('rake the tip inside the span: the longer edge keeps it', () => {
+    for (const [angleDeg, keeps] of [
+      [20, 'te'],
+      [-20, 'le'],
+    ] as const) {
+      const { parts, problems } = wing({ shape: 'raked', angleDeg });
+      expect(problems).toEqual([]);
+      assertParts(parts);
+      const outline = parts[0]?.outline ?? [];
+      const outermost = outline.filter(([x]) => x > 310 - 1e-6);
+      expect(outermost).toHaveLength(1);
+      expect(outermost[0]?.[1]).toBeCloseTo(keeps === 'te' ? -190 : 0, 9);
+      const other = outline.filter(([, y]) => Math.abs(y - (keeps === 'te' ? 0 : -190)) < 1e-6).map(([x]) => x);
+      expect(Math.max(...other)).toBeCloseTo(310 - 190 * Math.tan((20 * Math.PI) / 180), 6);
+    }
+  });
+
+  it('round both corners of a tip', () => {
+    const { parts, problems } = wing({ shape: 'rounded', radiusMm: 30 });
+    expect(problems).toEqual([]);
+    assertParts(parts);
+    // Two corners lose (1 - pi/4) r2 each, less what straight pieces within 0.05 mm leave on; the control's inner gap is 1.5 mm wide.
+    const lost = 310 * 190 - area(parts[0]?.outline ?? []) - 1.5 * 0.25 * 190;
+    expect(lost).toBeGreaterThan(2 * (1 - Math.PI / 4) * 900 - 1);
+    expect(lost).toBeLessThan(2 * (1 - Math.PI / 4) * 900 + 2 * 47 * 0.05);
+  });
+
+  it('turn an all-moving tail about its axis to its neutral setting, without a hinge in the sheet', () => {
+    const turning = control({
+      id: 'stab',
+      kind: 'allMoving',
+      from: 0,
+      to: 1,
+      neutralDeg: 5,
+      hinge: { kind: 'pinned', side: 'upper', bevelDeg: [0, 0], axis: 0.25 },
+      mix: { pitch: 1, roll: 0, yaw: 0, flap: 0 },
+    });
+    const { parts, problems } = develop(
+      airframe({
+        surfaces: [
+          surface({
+            id: 'tail',
+            role: 'tailplane',
+            panels: [panel({ lengthMm: 120, rootChordMm: 80, tipChordMm: 80 })],
+            controls: [turning],
+          }),
+        ],
+      }),
+    );
+    expect(problems).toEqual([]);
+    const [tail] = parts;
+    if (!tail) throw new RangeError('no tail');
+    expect(parts).toHaveLength(1);
+    expect(tail.operations.map(({ kind }) => kind)).toEqual(['reference']);
+    // Trailing edge down by 60 sin 5 degrees behind the axis, leading edge up by 20 sin 5.
+    const zs = inSpace(tail).map(([, , z]) => z);
+    expect(Math.min(...zs)).toBeCloseTo(-60 * Math.sin((5 * Math.PI) / 180), 9);
+    expect(Math.max(...zs)).toBeCloseTo(20 * Math.sin((5 * Math.PI) / 180), 9);
+  });
+});

@@ -8,8 +8,9 @@ import { fill } from '@/lib/text/fill';
 import { bodyParts } from './body/bodyParts';
 import type { BoomHere } from './surface/boom';
 import { tooLong } from './surface/spar';
-import { surfaceParts } from './surface/surfaceParts';
+import { type Developed, surfaceParts } from './surface/surfaceParts';
 import type { Development, StockPiece } from './types';
+import { partFault } from './validate';
 
 const byId = <T extends { readonly id: string }>(list: readonly T[]): ReadonlyMap<string, T> =>
   new Map(list.map((entry) => [entry.id, entry]));
@@ -32,6 +33,18 @@ function boomPieces(booms: readonly BoomHere[], airframe: Airframe): { pieces: S
   return { pieces, problems };
 }
 
+/** Nothing leaves here that a blade cannot follow: such a part is left out and named at its element. */
+function cuttable(made: Developed, path: string): Developed {
+  const faults = made.parts.flatMap((part): Problem[] => {
+    const fault = partFault(part);
+    if (!fault) return [];
+    const message = fill(texts.problems.partCannotBeCut, { part: part.name, fault });
+    return [{ code: 'part-cannot-be-cut', path, message, fix: texts.problems.partCannotBeCutFix }];
+  });
+  if (faults.length === 0) return made;
+  return { ...made, parts: made.parts.filter((part) => !partFault(part)), problems: [...made.problems, ...faults] };
+}
+
 /** As `develop`, for a caller that has the resolved airframe already. */
 export function developResolved(airframe: Airframe, resolved: ResolvedAirframe): Development {
   const stock = { materials: byId(airframe.materials), tubes: byId(airframe.tubes) };
@@ -41,10 +54,14 @@ export function developResolved(airframe: Airframe, resolved: ResolvedAirframe):
     const tube = boom && stock.tubes.get(boom.tubeId);
     return boom && tube ? [{ boom, resolved: place, tube }] : [];
   });
-  const surfaces = resolved.surfaces.map((surface) => surfaceParts(surface, resolved.controls, stock, booms));
-  const bodies = airframe.bodies.map((body, index) =>
-    bodyParts(body, index, resolved.places.get(body.id)?.at ?? [0, 0, 0], stock.materials),
+  const surfaces = resolved.surfaces.map((surface) =>
+    cuttable(surfaceParts(surface, resolved.controls, stock, booms), `surfaces.${surface.index}`),
   );
+  const bodies = airframe.bodies.map((body, index) => {
+    const place = resolved.places.get(body.id);
+    if (!place) throw new RangeError(`body ${body.id} has no place in the resolved airframe`);
+    return cuttable(bodyParts(body, index, place.at, stock.materials), `bodies.${index}`);
+  });
   const { pieces, problems } = boomPieces(booms, airframe);
   return {
     parts: [...surfaces, ...bodies].flatMap(({ parts }) => parts),

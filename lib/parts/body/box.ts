@@ -5,11 +5,11 @@ import type { Vec3 } from '@/lib/numerics/vec';
 import { texts } from '@/lib/text/en/parts';
 import { fill } from '@/lib/text/fill';
 import { bothSides, centrePart, type Draft, sidePart } from '../draft';
+import { openDraft } from '../opening';
 import type { Polyline } from '../shape/polyline';
-import { openRing } from '../surface/cutout';
 import type { Operation, Part } from '../types';
 import type { BoxLines } from './boxLines';
-import { type FacePiece, facePiece } from './faces';
+import { type BodyFace, type FacePiece, facePiece } from './faces';
 import { openingsOn } from './openings';
 
 export interface Box {
@@ -50,12 +50,14 @@ function glueLines(piece: FacePiece): Operation[] {
   }));
 }
 
-function draftOf(box: Box, piece: FacePiece, key: string, name: Draft['name']): Omit<Draft, 'outline' | 'holes'> {
+function draftOf(box: Box, piece: FacePiece, key: string, name: Draft['name']): Draft {
   return {
     key: `${box.body.id}/${key}`,
     name,
     elementId: box.body.id,
     material: box.material,
+    outline: piece.outline,
+    holes: [],
     operations: piece.folds,
     frame: piece.frame,
     faces: ['outer', 'inner'],
@@ -73,29 +75,30 @@ export function boxFaces(box: Box): { parts: Part[]; problems: Problem[] } {
   const faces = facesOf(box);
   const values = { body: box.name };
   const sideName: Draft['name'] = (side) => fill(texts.names.bodySide, { ...values, side: texts.sides[side] });
-  const opened = (face: 'stbd' | 'port' | 'top' | 'bottom') => {
-    const piece = face === 'top' ? faces.top : face === 'bottom' ? faces.bottom : faces.side;
+  const cut = (face: BodyFace, piece: FacePiece, draft: Draft) => {
     const on = openingsOn(face, piece, body, path);
-    const cut = openRing(piece.outline, on.openings);
-    return { outline: cut.outline, holes: cut.holes, problems: [...on.problems, ...cut.problems] };
+    const made = openDraft(draft, on.openings);
+    return { draft: made.draft, problems: [...on.problems, ...made.problems] };
   };
-  const made = { stbd: opened('stbd'), port: opened('port'), top: opened('top'), bottom: opened('bottom') };
-  const side = {
-    ...draftOf(box, faces.side, 'side', sideName),
-    operations: [...faces.side.folds, ...glueLines(faces.side)],
-  };
+  const plain = draftOf(box, faces.side, 'side', sideName);
+  const side: Draft = { ...plain, operations: [...plain.operations, ...glueLines(faces.side)] };
+  const stbd = cut('stbd', faces.side, side);
+  const port = cut('port', faces.side, side);
+  const top = cut(
+    'top',
+    faces.top,
+    draftOf(box, faces.top, 'top', () => fill(texts.names.bodyTop, values)),
+  );
+  const bottom = cut(
+    'bottom',
+    faces.bottom,
+    draftOf(box, faces.bottom, 'bottom', () => fill(texts.names.bodyBottom, values)),
+  );
   const sides = sameBothSides(body)
-    ? bothSides({ ...side, ...made.stbd })
-    : [sidePart({ ...side, ...made.stbd }, 'stbd'), sidePart({ ...side, ...made.port }, 'port')];
+    ? bothSides(stbd.draft)
+    : [sidePart(stbd.draft, 'stbd'), sidePart(port.draft, 'port')];
   return {
-    parts: [
-      ...sides,
-      centrePart({ ...draftOf(box, faces.top, 'top', () => fill(texts.names.bodyTop, values)), ...made.top }),
-      centrePart({
-        ...draftOf(box, faces.bottom, 'bottom', () => fill(texts.names.bodyBottom, values)),
-        ...made.bottom,
-      }),
-    ],
-    problems: [made.stbd, made.port, made.top, made.bottom].flatMap(({ problems }) => problems),
+    parts: [...sides, centrePart(top.draft), centrePart(bottom.draft)],
+    problems: [stbd, port, top, bottom].flatMap(({ problems }) => problems),
   };
 }

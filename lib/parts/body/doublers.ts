@@ -5,8 +5,8 @@ import { texts } from '@/lib/text/en/parts';
 import { fill } from '@/lib/text/fill';
 import { trimmedDigits } from '@/lib/units/number';
 import { centrePart, type Draft, sidePart } from '../draft';
+import { openDraft } from '../opening';
 import { offsetLine, type Polyline } from '../shape/polyline';
-import { openRing } from '../surface/cutout';
 import type { Part } from '../types';
 import type { Box } from './box';
 import { type BodyFace, type FacePiece, facePiece } from './faces';
@@ -50,10 +50,6 @@ function doublerPiece({ lines, origin }: Box, { face, fromX, toX }: Doubler, mat
 
 function doublerPart(box: Box, doubler: Doubler, material: Material): { part: Part; problems: readonly Problem[] } {
   const piece = doublerPiece(box, doubler, material);
-  const { outline, holes, problems } = openRing(
-    piece.outline,
-    openingsThrough(doubler.face, piece, box.body, box.path),
-  );
   const onSide = doubler.face === 'stbd' || doubler.face === 'port';
   const values = { body: box.name, id: doubler.id };
   const draft: Draft = {
@@ -64,15 +60,17 @@ function doublerPart(box: Box, doubler: Doubler, material: Material): { part: Pa
         : fill(texts.names.doubler, values),
     elementId: doubler.id,
     material,
-    outline,
-    holes,
+    outline: piece.outline,
+    holes: [],
     operations: piece.folds,
     frame: piece.frame,
     faces: ['outer', 'inner'],
     grainDeg: onSide ? 0 : 90,
   };
-  const part = doubler.face === 'stbd' || doubler.face === 'port' ? sidePart(draft, doubler.face) : centrePart(draft);
-  return { part, problems };
+  const made = openDraft(draft, openingsThrough(doubler.face, piece, box.body, box.path));
+  const part =
+    doubler.face === 'stbd' || doubler.face === 'port' ? sidePart(made.draft, doubler.face) : centrePart(made.draft);
+  return { part, problems: made.problems };
 }
 
 /** All doublers of a box body, and a problem for each that leaves it. */

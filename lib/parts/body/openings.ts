@@ -5,9 +5,9 @@ import type { Vec2 } from '@/lib/numerics/vec';
 import { texts } from '@/lib/text/en/parts';
 import { fill } from '@/lib/text/fill';
 import { trimmedDigits } from '@/lib/units/number';
+import type { Opening } from '../opening';
 import { heightAt } from '../shape/polyline';
 import { distanceToRing } from '../shape/ring';
-import type { Opening } from '../surface/cutout';
 import type { BodyFace, FacePiece } from './faces';
 
 /** Foam left between an opening and an edge of its face, mm: less tears out. Common practice, no source. */

@@ -6,9 +6,9 @@ import type { Vec2, Vec3 } from '@/lib/numerics/vec';
 import { texts } from '@/lib/text/en/parts';
 import { fill } from '@/lib/text/fill';
 import { centrePart } from '../draft';
+import { type Opening, openDraft } from '../opening';
 import { heightAt } from '../shape/polyline';
 import { cleanRing, distanceToRing, mirror2, selfCrossing } from '../shape/ring';
-import { openRing } from '../surface/cutout';
 import type { Developed } from '../surface/surfaceParts';
 import { OPENING_EDGE_MM } from './openings';
 
@@ -27,7 +27,7 @@ function plateOpenings(
   body: Body,
   path: string,
   outline: readonly Vec2[],
-): { openings: { path: string; rings: Vec2[][] }[]; problems: Problem[] } {
+): { openings: Opening[]; problems: Problem[] } {
   const problems: Problem[] = [];
   const middle = (x: number): number =>
     (heightAt(
@@ -70,18 +70,20 @@ export function profileParts(body: Body, path: string, origin: Vec3, material: M
     };
   }
   const found = plateOpenings(body, path, ring);
-  const cut = openRing(ring, found.openings);
-  const part = centrePart({
-    key: `${body.id}/plate`,
-    name: () => fill(texts.names.bodyPlate, { body: body.name ?? texts.names.body }),
-    elementId: body.id,
-    material,
-    outline: cut.outline,
-    holes: cut.holes,
-    operations: [],
-    frame: { origin, ex: [-1, 0, 0], ey: [0, 0, 1] },
-    faces: ['outer', 'inner'],
-    grainDeg: 0,
-  });
-  return { parts: [part], stockPieces: [], problems: [...problems, ...found.problems, ...cut.problems] };
+  const { draft, problems: cut } = openDraft(
+    {
+      key: `${body.id}/plate`,
+      name: () => fill(texts.names.bodyPlate, { body: body.name ?? texts.names.body }),
+      elementId: body.id,
+      material,
+      outline: ring,
+      holes: [],
+      operations: [],
+      frame: { origin, ex: [-1, 0, 0], ey: [0, 0, 1] },
+      faces: ['outer', 'inner'],
+      grainDeg: 0,
+    },
+    found.openings,
+  );
+  return { parts: [centrePart(draft)], stockPieces: [], problems: [...problems, ...found.problems, ...cut] };
 }

@@ -4,12 +4,15 @@ import { cleanRing, distance, distanceToEdge, NOTHING_MM, type Ring } from './ri
 
 // Cutting a ring along a path whose two ends lie on its edge. Exact: no point of the ring moves.
 
+/** A cut that ends nearer to the edge than this ends on it, mm: rounding of a path worked out from other lines. */
+const ON_EDGE_MM = 1e-3;
+
 interface Spot {
   readonly edge: number;
   readonly along: number;
 }
 
-function spotOn(ring: Ring, p: Vec2): Spot {
+function spotOn(ring: Ring, p: Vec2): Spot | null {
   let best: Spot = { edge: 0, along: 0 };
   let least = Number.POSITIVE_INFINITY;
   for (const [edge, [a, b]] of edges(ring).entries()) {
@@ -19,8 +22,7 @@ function spotOn(ring: Ring, p: Vec2): Spot {
       best = { edge, along: distance(a, p) };
     }
   }
-  if (least > 1e-3) throw new RangeError(`a cut must end on the outline, but ${p.join(', ')} lies ${least} mm off it`);
-  return best;
+  return least <= ON_EDGE_MM ? best : null;
 }
 
 /** The ring's corners met between two spots, going its own way round. */
@@ -33,24 +35,25 @@ function between(ring: Ring, from: Spot, to: Spot): Vec2[] {
 
 /**
  * Cuts a counter-clockwise ring along a path that runs through its inside from edge to edge; the two pieces, to the left
- * and to the right of the path, both counter-clockwise. Throws RangeError when an end lies off the outline.
+ * and to the right of the path, both counter-clockwise; null when an end lies off the outline.
  */
-export function cutRing(ring: Ring, path: readonly Vec2[]): { left: Vec2[]; right: Vec2[] } {
+export function cutRing(ring: Ring, path: readonly Vec2[]): { left: Vec2[]; right: Vec2[] } | null {
   const first = path[0];
   const last = path.at(-1);
   if (!first || !last || path.length < 2) throw new RangeError(`a cut needs two points, got ${path.length}`);
   const a = spotOn(ring, first);
   const b = spotOn(ring, last);
+  if (!a || !b) return null;
   return {
     left: cleanRing([...between(ring, b, a), ...path]),
     right: cleanRing([...between(ring, a, b), ...[...path].reverse()]),
   };
 }
 
-/** Where a ray from a point inside first meets the ring; null when it never does. `direction` need not have unit length. */
+/** Where a ray from a point inside first meets the ring; null when it never does or has no direction. `direction` need not have unit length. */
 export function rayTo(ring: Ring, from: Vec2, direction: Vec2): Vec2 | null {
   const size = Math.hypot(...direction);
-  if (!(size > 0)) throw new RangeError('a ray needs a direction');
+  if (!(size > 0)) return null;
   const [dx, dy] = [direction[0] / size, direction[1] / size];
   let nearest = Number.POSITIVE_INFINITY;
   for (const [a, b] of edges(ring)) {

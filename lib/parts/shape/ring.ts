@@ -1,4 +1,5 @@
-import { edges } from '@/lib/geometry/polygons';
+import { contains, edges } from '@/lib/geometry/polygons';
+import { SAME_POINT_MM } from '@/lib/numerics/tolerances';
 import type { Vec2 } from '@/lib/numerics/vec';
 
 // Closed outlines in a part's own axes, mm: x right, y up. A ring is not closed by a repeated point.
@@ -100,3 +101,6 @@ export function selfCrossing(ring: Ring): readonly [number, number] | null {
   }
   return null;
 }
+
+/** Whether a point lies inside the ring or on its edge, to what a blade can follow. */
+export const onSheet = (p: Vec2, ring: Ring): boolean => contains(ring, p) || distanceToRing(p, ring) <= SAME_POINT_MM;

@@ -26,7 +26,9 @@ describe('cutRing', () => {
         (x, height, wide) => {
           const onEdge = (at: number): Vec2 => (at <= 70 ? [at, (-5 * at) / 70] : [at, -5 + (5 * (at - 70)) / 40]);
           const path: Vec2[] = [onEdge(x), [x, height], [x + wide, height], onEdge(x + wide)];
-          const { left, right } = cutRing(sheet, path);
+          const cut = cutRing(sheet, path);
+          if (!cut) throw new RangeError('the cut ends on the edge');
+          const { left, right } = cut;
           expect(signedArea(left) + signedArea(right)).toBeCloseTo(signedArea(sheet), 8);
           expect(signedArea(right)).toBeGreaterThan(0);
           expect(signedArea(left)).toBeGreaterThan(signedArea(right));
@@ -35,13 +37,13 @@ describe('cutRing', () => {
     );
   });
 
-  it('refuses a cut that ends off the outline', () => {
-    expect(() =>
+  it('has no answer for a cut that ends off the outline', () => {
+    expect(
       cutRing(sheet, [
         [10, 10],
         [20, 20],
       ]),
-    ).toThrow(RangeError);
+    ).toBeNull();
   });
 });
 

@@ -70,8 +70,16 @@ function controlsHere(
   return { here: here.sort((a, b) => a.control.from - b.control.from), problems };
 }
 
-const cutOff = (ring: readonly Vec2[], paths: readonly (readonly Vec2[])[]): Vec2[] =>
-  paths.reduce<Vec2[]>((left, path) => cutRing(left, path).left, [...ring]);
+/** What is left of a sheet when what lies to the right of each path is taken off; null when a path does not end on its edge. */
+function cutOff(ring: readonly Vec2[], paths: readonly (readonly Vec2[])[]): Vec2[] | null {
+  let left: Vec2[] = [...ring];
+  for (const path of paths) {
+    const cut = cutRing(left, path);
+    if (!cut) return null;
+    left = cut.left;
+  }
+  return left;
+}
 
 function slitOperations(cut: ControlCut, id: string, run: Run, face: 'upper' | 'lower'): Operation[] {
   const own = slits(cut);
@@ -86,8 +94,8 @@ function slitOperations(cut: ControlCut, id: string, run: Run, face: 'upper' | '
   }));
 }
 
-/** Hinge operations on the sheet and on the pieces that come off it. */
-function parted(run: Run, control: ResolvedControl, cut: ControlCut, outline: readonly Vec2[]) {
+/** Hinge operations on the sheet, and the piece that comes off it; null when the control does not end on the sheet's edge. */
+function parted(run: Run, control: ResolvedControl, cut: ControlCut, solid: readonly Vec2[]) {
   const { thicknessMm } = run.material;
   const own = hingeOperations(control.control, cut.hinge, thicknessMm, '');
   const twoHinges = run.centre && cut.joined !== 'through';
@@ -97,17 +105,37 @@ function parted(run: Run, control: ResolvedControl, cut: ControlCut, outline: re
   if (!isSeparate(control.control)) return { operations, moving: [] };
   // The port half of a pair is the mirror of this one, made when the parts are.
   const [path] = partingPaths(cut, 'moving', run.centre);
-  const moving: MovingPiece[] = path
-    ? [
-        {
-          control,
-          outline: cutRing(outline, path).right,
-          operations: own.moving,
-          centre: run.centre && cut.joined === 'through',
-        },
-      ]
-    : [];
+  const piece = path && cutRing(solid, path);
+  if (!piece) return null;
+  const centre = run.centre && cut.joined === 'through';
+  const moving: MovingPiece[] = [{ control, outline: piece.right, operations: own.moving, centre }];
   return { operations, moving };
+}
+
+interface Sheet {
+  readonly outline: Vec2[];
+  readonly solid: Vec2[];
+  readonly operations: readonly Operation[];
+  readonly moving: readonly MovingPiece[];
+}
+
+/** The sheet with one more control cut free, or null when the control does not end on the sheet's edge. */
+function freed(sheet: Sheet, run: Run, strip: Strip, control: ResolvedControl, ends: Ends): Sheet | null {
+  const cut = controlCut({ ring: sheet.solid, strip, control, frame: run.frame }, endKinds(run, control, ends));
+  const pieces = cut && parted(run, control, cut, sheet.solid);
+  if (!cut || !pieces) return null;
+  const separate = isSeparate(control.control);
+  const parting = partingPaths(cut, 'fixed', run.centre);
+  const solid = cutOff(sheet.solid, parting);
+  const outline = cutOff(sheet.outline, separate ? parting : gapPaths(cut, run.centre));
+  if (!solid || !outline) return null;
+  const slitted = separate ? [] : slitOperations(cut, control.control.id, run, control.control.hinge.side);
+  return {
+    outline,
+    solid,
+    operations: [...sheet.operations, ...pieces.operations, ...slitted],
+    moving: [...sheet.moving, ...pieces.moving],
+  };
 }
 
 /** Cuts the controls of a flat piece free: slots at the ends of those that stay on it, whole pieces of those that do not. */
@@ -118,32 +146,16 @@ export function controlledSheet(
   ends: Ends,
 ): ControlledSheet {
   const whole = ringOf(strip, run.centre);
-  const corner = whole[0];
   const { here, problems: crossing } = controlsHere(run, controls);
   const problems = [...crossing];
-  const operations: Operation[] = [];
-  const moving: MovingPiece[] = [];
-  let outline: Vec2[] = whole;
-  let solid: Vec2[] = whole;
+  let sheet: Sheet = { outline: whole, solid: whole, operations: [], moving: [] };
   for (const control of here) {
     const index = run.surface.surface.controls.indexOf(control.control);
     const path = `surfaces.${run.surface.index}.controls.${index}`;
     problems.push(...hingeProblems(control.control, run.material, path));
-    const cut = controlCut({ ring: solid, strip, control, frame: run.frame }, endKinds(run, control, ends));
-    if (!cut) {
-      problems.push({ code: 'control-off-sheet', path: `${path}.to`, message: texts.problems.controlOffSheet });
-      continue;
-    }
-    const pieces = parted(run, control, cut, solid);
-    operations.push(...pieces.operations);
-    moving.push(...pieces.moving);
-    solid = cutOff(solid, partingPaths(cut, 'fixed', run.centre));
-    if (isSeparate(control.control)) {
-      outline = cutOff(outline, partingPaths(cut, 'fixed', run.centre));
-    } else {
-      outline = cutOff(outline, gapPaths(cut, run.centre));
-      operations.push(...slitOperations(cut, control.control.id, run, control.control.hinge.side));
-    }
+    const next = freed(sheet, run, strip, control, ends);
+    if (next) sheet = next;
+    else problems.push({ code: 'control-off-sheet', path: `${path}.to`, message: texts.problems.controlOffSheet });
   }
-  return { outline: beginAt(outline, corner), solid, operations, moving, problems };
+  return { ...sheet, outline: beginAt(sheet.outline, whole[0]), problems };
 }

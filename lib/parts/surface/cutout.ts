@@ -1,28 +1,9 @@
-import { differenceD, FillRule, type PathsD } from 'clipper2-ts';
 import { pointAt } from '@/lib/airframe/section';
-import { contains, counterClockwise, edges, signedArea } from '@/lib/geometry/polygons';
-import type { Problem } from '@/lib/numerics/result';
-import type { Vec2 } from '@/lib/numerics/vec';
-import { texts } from '@/lib/text/en/parts';
+import { counterClockwise } from '@/lib/geometry/polygons';
+import type { Opening } from '../opening';
 import { toPart } from '../shape/frame';
-import { beginAt, cleanRing, distanceToRing, edgesCross, mirrorRing, NOTHING_MM, type Ring } from '../shape/ring';
+import { mirrorRing } from '../shape/ring';
 import type { Run } from './run';
-
-// Openings in a sheet: a hole where they lie inside it, a notch where they reach its edge.
-
-/** One opening: its rings, counter-clockwise, and the document path that asks for it. */
-export interface Opening {
-  readonly path: string;
-  readonly rings: readonly Vec2[][];
-}
-
-export interface Opened {
-  readonly outline: Vec2[];
-  readonly holes: readonly Vec2[][];
-  readonly problems: readonly Problem[];
-}
-
-const forward = (ring: Ring): Vec2[] => [...counterClockwise(ring)];
 
 /** A surface's cutouts that begin on this piece, in its axes, counter-clockwise; both sides' when the piece spans the centre. */
 export function cutoutRings(run: Run): Opening[] {
@@ -32,65 +13,10 @@ export function cutoutRings(run: Run): Opening[] {
   return surface.cutouts.flatMap(({ outline }, index) => {
     const stations = outline.map(([station]) => station);
     if (Math.max(...stations) <= from || Math.min(...stations) >= to) return [];
-    const ring = forward(outline.map(([station, share]) => toPart(run.frame, pointAt(run.surface, station, share))));
+    const ring = [
+      ...counterClockwise(outline.map(([station, at]) => toPart(run.frame, pointAt(run.surface, station, at)))),
+    ];
     const path = `surfaces.${run.surface.index}.cutouts.${index}.outline`;
     return [{ path, rings: run.centre ? [ring, mirrorRing(ring)] : [ring] }];
-  });
-}
-
-const crosses = (a: Ring, b: Ring): boolean =>
-  edges(a).some(([p, q]) => edges(b).some(([r, s]) => edgesCross(p, q, r, s)));
-
-const wellInside = (ring: Ring, outline: Ring): boolean =>
-  ring.every((p) => contains(outline, p) && distanceToRing(p, outline) > NOTHING_MM) && !crosses(ring, outline);
-
-/** Corners of a ring and the middles of its edges: where a ring lies is told by these when its corners stand on another's edge. */
-const marksOf = (ring: Ring): Vec2[] =>
-  edges(ring).flatMap(([a, b]): Vec2[] => [a, [(a[0] + b[0]) / 2, (a[1] + b[1]) / 2]]);
-
-const wellOutside = (ring: Ring, outline: Ring): boolean => {
-  const reaches = (one: Ring, other: Ring): boolean =>
-    marksOf(one).some((p) => contains(other, p) && distanceToRing(p, other) > NOTHING_MM);
-  return !crosses(ring, outline) && !reaches(ring, outline) && !reaches(outline, ring);
-};
-
-/** Takes openings out of a piece. An opening that would part it in two is a problem and is left out. */
-export function openRing(outline: Vec2[], openings: readonly Opening[]): Opened {
-  let left = outline;
-  let holes: Vec2[][] = [];
-  const problems: Problem[] = [];
-  for (const { path, rings } of openings) {
-    const touching = rings.filter((ring) => !wellOutside(ring, left));
-    if (touching.length === 0) continue;
-    const apart = touching.every((ring, index) => touching.slice(index + 1).every((other) => wellOutside(ring, other)));
-    const clear = touching.every(
-      (ring) => wellInside(ring, left) && holes.every((hole) => wellOutside(ring, forward(hole))),
-    );
-    if (apart && clear) {
-      holes = [...holes, ...touching.map((ring) => cleanRing(ring).reverse())];
-      continue;
-    }
-    const result = subtract([left, ...holes], touching);
-    const [whole, ...more] = result.filter((ring) => signedArea(ring) > 0);
-    if (!whole || more.length > 0) {
-      problems.push({ code: 'opening-parts-sheet', path, message: texts.problems.openingPartsSheet });
-      continue;
-    }
-    left = beginAt(whole, outline[0]);
-    holes = result.filter((ring) => signedArea(ring) < 0);
-  }
-  return { outline: left, holes, problems };
-}
-
-/** Decimal places of the clipping, mm: 1e-6 mm is far below what any cutter follows and keeps the products in range. */
-const CLIP_PLACES = 6;
-
-function subtract(subject: readonly Ring[], clip: readonly Ring[]): Vec2[][] {
-  const toPaths = (rings: readonly Ring[]): PathsD => rings.map((ring) => ring.map(([x, y]) => ({ x, y })));
-  return differenceD(toPaths(subject), toPaths(clip), FillRule.NonZero, CLIP_PLACES).map((path) => {
-    const ring = path.map(({ x, y }): Vec2 => [x, y]);
-    const known = [...subject.flat(), ...clip.flat()];
-    // Clipping rounds to its own grid: corners that were given keep their exact place.
-    return cleanRing(ring.map((p) => known.find((q) => Math.hypot(p[0] - q[0], p[1] - q[1]) < 2e-6) ?? p));
   });
 }

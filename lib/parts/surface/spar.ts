@@ -1,16 +1,16 @@
 import type { Tube } from '@/lib/airframe/schema/stock';
 import type { Surface } from '@/lib/airframe/schema/surface';
 import { pointAt } from '@/lib/airframe/section';
-import { contains, counterClockwise } from '@/lib/geometry/polygons';
+import { counterClockwise } from '@/lib/geometry/polygons';
 import { notBuiltYet, type Problem } from '@/lib/numerics/result';
 import { length3, mirror3, sub3, type Vec2, type Vec3 } from '@/lib/numerics/vec';
 import { texts } from '@/lib/text/en/parts';
 import { fill } from '@/lib/text/fill';
 import { trimmedDigits } from '@/lib/units/number';
+import type { Opening } from '../opening';
 import { toPart } from '../shape/frame';
-import { mirror2, type Ring } from '../shape/ring';
+import { mirror2, onSheet, type Ring } from '../shape/ring';
 import type { Operation, StockPiece } from '../types';
-import type { Opening } from './cutout';
 import type { Run } from './run';
 
 // Tubes and strips let into a flat sheet: a channel in the foam and a bought length.
@@ -27,6 +27,8 @@ type Spar = Surface['spars'][number];
 const NONE: Sparred = { operations: [], slots: [], stockPieces: [], problems: [] };
 /** A spar that leans less than this from tip to centre is one straight tube through both sides, mm. */
 const STRAIGHT_MM = 0.05;
+/** Shorter than this is no spar, mm. */
+const LEAST_SPAR_MM = 1;
 const mm = (value: number): string => trimmedDigits(value, 1);
 
 /** A spar's two ends on its surface: the chord shares are those of the spar's own inner and outer end. */
@@ -82,8 +84,11 @@ function sparOn(run: Run, ring: Ring, spar: Spar, tube: Tube | undefined, path: 
   if (!tube) return { ...NONE, problems: [notBuiltYet(`${path}.materialId`, texts.notBuilt.sparLet)] };
   const ends = sparEnds(run, spar);
   const [a, b] = [toPart(run.frame, ends[0]), toPart(run.frame, ends[1])];
-  const inside = [0.05, 0.5, 0.95].every((t) => contains(ring, [a[0] + (b[0] - a[0]) * t, a[1] + (b[1] - a[1]) * t]));
-  if (!inside) return problem('spar-off-sheet', `${path}.chordShare`, texts.problems.sparOffSheet);
+  const inside = [0, 0.25, 0.5, 0.75, 1].every((t) =>
+    onSheet([a[0] + (b[0] - a[0]) * t, a[1] + (b[1] - a[1]) * t], ring),
+  );
+  if (!inside || length3(sub3(ends[1], ends[0])) < LEAST_SPAR_MM)
+    return problem('spar-off-sheet', `${path}.chordShare`, texts.problems.sparOffSheet);
   const across = run.centre && spar.from === 0 && Math.abs(b[1] - a[1]) < STRAIGHT_MM;
   const own: readonly Vec2[] = across ? [mirror2(b), b] : [a, b];
   const made = letIn(run, spar, tube, run.centre && !across ? [own, own.map(mirror2)] : [own], path);

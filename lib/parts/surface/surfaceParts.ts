@@ -1,10 +1,11 @@
 import type { ResolvedControl, ResolvedSurface } from '@/lib/airframe/resolved';
 import type { Material, Tube } from '@/lib/airframe/schema/stock';
 import { notBuiltYet, type Problem } from '@/lib/numerics/result';
-import { add3, scale3, sub3 } from '@/lib/numerics/vec';
+import { add3, scale3, sub3, type Vec2 } from '@/lib/numerics/vec';
 import { texts } from '@/lib/text/en/parts';
 import { fill } from '@/lib/text/fill';
 import { bothSides, centrePart, type Draft } from '../draft';
+import { openDraft } from '../opening';
 import { fromPart, normalOf, turnFrame, unit3 } from '../shape/frame';
 import { mirror2 } from '../shape/ring';
 import type { Operation, Part, PartFrame, StockPiece } from '../types';
@@ -12,12 +13,12 @@ import { type BoomHere, boomsOn } from './boom';
 import { buildablePanels } from './buildable';
 import { hingeLine } from './control';
 import { controlledSheet, type MovingPiece } from './controlledSheet';
-import { cutoutRings, openRing } from './cutout';
+import { cutoutRings } from './cutout';
 import { isDoubleBevel } from './hinge';
-import { cutToSeam, seamOf, seamOperations, seamProblems } from './joint';
+import { cutToSeam, type Seam, seamOf, seamOperations, seamProblems } from './joint';
 import { meetsItsMirror, type Run, runsOf } from './run';
 import { sparsOn, surfaceName } from './spar';
-import { stripOf } from './strip';
+import { type Strip, stripOf } from './strip';
 import { tipped } from './tip';
 
 export interface Developed {
@@ -117,68 +118,80 @@ const onPortHalf = (operation: Operation): Operation => ({
   path: operation.path.map(mirror2),
 });
 
-/** Everything that is cut from one flat piece of a surface. */
-function runParts(
-  run: Run,
-  controls: readonly ResolvedControl[],
-  turning: readonly ResolvedControl[],
-  stock: Stock,
-  booms: readonly BoomHere[],
-): Developed {
+/** A flat piece cut to its seams and its tip. */
+function shaped(run: Run): { strip: Strip; seams: Seam[]; problems: readonly Problem[] } {
   const { surface, index, panels } = run.surface;
-  const { thicknessMm } = run.material;
-  const isTip = run.panels.at(-1)?.index === panels.length - 1;
   const seams = [seamOf(run, 'root'), seamOf(run, 'tip')].flatMap((seam) => seam ?? []);
-  const jointed = seams.reduce((strip, seam) => cutToSeam(strip, seam, thicknessMm), stripOf(run));
-  const { strip, problems: tipProblems } = isTip
-    ? tipped(jointed, surface.tip, `surfaces.${index}.tip`)
-    : { strip: jointed, problems: [] };
-  const ends = { rootSeam: seams.some(({ end }) => end === 'root'), tipSeam: seams.some(({ end }) => end === 'tip') };
-  const sheet = controlledSheet(run, strip, controls, ends);
-  const openings = cutoutRings(run);
-  const spars = sparsOn(run, sheet.solid, stock.tubes);
-  const opened = openRing(sheet.outline, [...openings, ...spars.slots]);
-  const pivot = turning[0];
-  const seamWork = seams.flatMap((seam) => seamOperations(strip, seam, thicknessMm, sheet.solid));
-  const draft: Draft = {
-    key: `${surface.id}/${run.panels.map(({ panel }) => panel.id).join('+')}/sheet`,
+  const jointed = seams.reduce((strip, seam) => cutToSeam(strip, seam, run.material.thicknessMm), stripOf(run));
+  const isTip = run.panels.at(-1)?.index === panels.length - 1;
+  const made = isTip ? tipped(jointed, surface.tip, `surfaces.${index}.tip`) : { strip: jointed, problems: [] };
+  return {
+    strip: made.strip,
+    seams,
+    problems: [...seams.flatMap((seam) => seamProblems(run, seam)), ...made.problems],
+  };
+}
+
+function sheetDraft(
+  run: Run,
+  outline: readonly Vec2[],
+  operations: readonly Operation[],
+  turning: ResolvedControl | undefined,
+): Draft {
+  return {
+    key: `${run.surface.surface.id}/${run.panels.map(({ panel }) => panel.id).join('+')}/sheet`,
     name: (side) => sheetName(run, side),
-    elementId: surface.id,
+    elementId: run.surface.surface.id,
     material: run.material,
-    outline: opened.outline,
-    holes: opened.holes,
-    operations: [
-      ...seamWork,
-      ...(run.centre ? seamWork.map(onPortHalf) : []),
-      ...sheet.operations,
-      ...spars.operations,
-      ...boomsOn(run, sheet.solid, booms),
-      ...turning.map((control) => pivotLine(run, control)),
-    ],
-    frame: pivot ? turnedTo(run.frame, run, pivot, 0) : run.frame,
+    outline,
+    holes: [],
+    operations: [...operations, ...(turning ? [pivotLine(run, turning)] : [])],
+    frame: turning ? turnedTo(run.frame, run, turning, 0) : run.frame,
     faces: ['upper', 'lower'],
     grainDeg: 0,
   };
-  const moving = sheet.moving.map((piece) => {
-    const cut = openRing([...piece.outline], openings);
-    return {
-      piece,
-      draft: { ...movingDraft(run, piece), outline: cut.outline, holes: cut.holes },
-      problems: cut.problems,
-    };
-  });
+}
+
+interface Fittings {
+  readonly controls: readonly ResolvedControl[];
+  /** The control that turns the whole surface, if one does. */
+  readonly turning: ResolvedControl | undefined;
+  readonly stock: Stock;
+  readonly booms: readonly BoomHere[];
+}
+
+/** Everything that is cut from one flat piece of a surface. */
+function runParts(run: Run, { controls, turning, stock, booms }: Fittings): Developed {
+  const { mirrored } = run.surface.surface;
+  const { strip, seams, problems } = shaped(run);
+  const has = (end: Seam['end']): boolean => seams.some((seam) => seam.end === end);
+  const sheet = controlledSheet(run, strip, controls, { rootSeam: has('root'), tipSeam: has('tip') });
+  const spars = sparsOn(run, sheet.solid, stock.tubes);
+  const seamWork = seams.flatMap((seam) => seamOperations(strip, seam, run.material.thicknessMm, sheet.solid));
+  const operations = [
+    ...seamWork,
+    ...(run.centre ? seamWork.map(onPortHalf) : []),
+    ...sheet.operations,
+    ...spars.operations,
+    ...boomsOn(run, sheet.solid, booms),
+  ];
+  const cutouts = cutoutRings(run);
+  const fixed = openDraft(sheetDraft(run, sheet.outline, operations, turning), [...cutouts, ...spars.slots]);
+  const moving = sheet.moving.map((piece) => ({
+    centre: piece.centre,
+    ...openDraft(movingDraft(run, piece), cutouts),
+  }));
   return {
     parts: [
-      ...partsOf(draft, surface.mirrored, run.centre),
-      ...moving.flatMap(({ piece, draft: own }) => partsOf(own, surface.mirrored, piece.centre)),
+      ...partsOf(fixed.draft, mirrored, run.centre),
+      ...moving.flatMap(({ draft, centre }) => partsOf(draft, mirrored, centre)),
     ],
     stockPieces: spars.stockPieces,
     problems: [
-      ...seams.flatMap((seam) => seamProblems(run, seam)),
-      ...tipProblems,
+      ...problems,
       ...sheet.problems,
-      ...opened.problems,
-      ...moving.flatMap(({ problems }) => problems),
+      ...fixed.problems,
+      ...moving.flatMap((piece) => piece.problems),
       ...spars.problems,
     ],
   };
@@ -194,7 +207,9 @@ export function surfaceParts(
   const { panels, problems } = buildablePanels(resolved, stock.materials);
   const own = controls.filter(({ surfaceId }) => surfaceId === resolved.surface.id);
   const { turning, problems: turningProblems } = allMoving(resolved, own);
-  const runs = runsOf(resolved, panels, stock.materials).map((run) => runParts(run, own, turning, stock, booms));
+  const runs = runsOf(resolved, panels, stock.materials).map((run) =>
+    runParts(run, { controls: own, turning: turning[0], stock, booms }),
+  );
   return {
     parts: runs.flatMap(({ parts }) => parts),
     stockPieces: runs.flatMap(({ stockPieces }) => stockPieces),

@@ -21,7 +21,7 @@ const GAP_MM = 4;
 function gridFor(sheets: readonly TiledSheet[], frame: Frame): { cols: number; scale: number; cell: Vec2 } {
   const widest = Math.max(...sheets.map(({ drawing }) => drawing.sheetMm[0]));
   const highest = Math.max(...sheets.map(({ drawing }) => drawing.sheetMm[1]));
-  let best = { cols: 1, scale: 0, cell: [frame.w, frame.h] as Vec2 };
+  let best: { cols: number; scale: number; cell: Vec2 } = { cols: 1, scale: 0, cell: [frame.w, frame.h] };
   for (let cols = 1; cols <= sheets.length; cols++) {
     const rows = Math.ceil(sheets.length / cols);
     const cell: Vec2 = [(frame.w - GAP_MM * (cols - 1)) / cols, (frame.h - GAP_MM * (rows - 1)) / rows];

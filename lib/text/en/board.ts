@@ -1,6 +1,6 @@
 // Texts of the building board: sheet, handles, slip, rule, figures, saving.
 
-export const board = { title: 'Building board' } as const;
+export const board = { title: 'Building board', fetching: 'Fetching…' } as const;
 
 export const elements = {
   numbered: '{name} {number}',
@@ -67,7 +67,8 @@ export const slip = {
 
 export const figures = {
   title: 'Figures that decide',
-  problemCount: 'Remarks on this airframe: {count}',
+  remarks: 'Remarks on this airframe',
+  remarkCount: 'Remarks: {count}',
   working: 'working it out…',
   atRest: 'worked out when you let go',
   failed: 'Figures could not be worked out: {message}',

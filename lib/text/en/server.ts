@@ -53,7 +53,7 @@ const details = {
   unknownKey: 'unknown key "{key}"',
   unknownPaper: 'there is no paper "{paper}"; there are: {known}',
   crossOrigin: 'Changes are taken only from this site itself.',
-  tooManySignIns: 'Too many tries for this address. Wait {minutes} minutes or reset the password.',
+  tooManyTries: 'Too many tries. Wait {minutes} min and try again.',
   busy: 'Try again in a few seconds.',
   noRoom: 'Nothing was changed. Make room on the disk and try again.',
   engineTimedOut: 'It took longer than {seconds} s and was stopped.',

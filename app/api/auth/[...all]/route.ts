@@ -1,0 +1,4 @@
+import { handleAuth } from '@/server/http/authRoute';
+
+export const GET = handleAuth;
+export const POST = handleAuth;

@@ -1,0 +1,44 @@
+import type { StoreApi } from 'zustand/vanilla';
+import { type FiguresJob, figuresSource } from '@/client/figures';
+import type { BoardState } from './board';
+import { recomputeCounter } from './perf';
+import { current } from './session';
+
+/** Asks the worker for figures whenever the airframe changed: those that decide while a handle is in the hand, all of them at rest. */
+export function followFigures(
+  store: StoreApi<BoardState>,
+  sceneMs: () => number,
+  makeSource: typeof figuresSource = figuresSource,
+): () => void {
+  const count = recomputeCounter();
+  const source = makeSource({
+    show: (figures, job, ms) => {
+      count(ms + sceneMs());
+      const { gesture, history } = store.getState();
+      const resting = gesture === null && job.airframe === history.present && job.depth === 'full';
+      store.setState({
+        figures,
+        figuresOf: job.airframe,
+        figuresFault: null,
+        ...(resting ? { settled: figures } : {}),
+      });
+    },
+    failed: (error) => store.setState({ figuresFault: error instanceof Error ? error.message : String(error) }),
+  });
+  let asked: FiguresJob | null = null;
+  const ask = (state: BoardState) => {
+    const job: FiguresJob = { airframe: current(state), depth: state.gesture === null ? 'full' : 'live' };
+    // Taking a handle without moving it is no reason to know less.
+    if (asked?.airframe === job.airframe && (asked.depth === 'full' || job.depth === 'live')) return;
+    asked = job;
+    source.ask(job);
+  };
+  ask(store.getState());
+  const leave = store.subscribe((state, before) => {
+    if (state.gesture !== before.gesture || state.history !== before.history) ask(state);
+  });
+  return () => {
+    leave();
+    source.stop();
+  };
+}

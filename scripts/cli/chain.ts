@@ -1,0 +1,50 @@
+import type { Airframe } from '@/lib/airframe/schema/airframe';
+import { analyse } from '@/lib/figures/analyse';
+import { layOut } from '@/lib/layout/layOut';
+import { LAYOUT_DEFAULTS, stockOf } from '@/lib/layout/stock';
+import { ok, type Result, refuse } from '@/lib/numerics/result';
+import { develop } from '@/lib/parts/develop';
+import type { PlanRevision as PrintedRevision } from '@/lib/plan/drawing';
+import type { ExportFile, Frozen } from '@/lib/plan/job';
+import { layoutProblems, makePlan } from '@/lib/plan/makePlan';
+import type { PlanFile } from '@/lib/plan/manifest';
+import { PAPERS, paperById } from '@/lib/plan/paper';
+import { plan } from '@/lib/text/en/plan';
+import { fill } from '@/lib/text/fill';
+import { readFonts } from './fonts';
+
+/** Everything that is frozen at a release, computed from the document. */
+export function compute(airframe: Airframe): Frozen {
+  const development = develop(airframe);
+  const layout = layOut(development.parts, stockOf(airframe), LAYOUT_DEFAULTS);
+  return { figures: analyse(airframe, { depth: 'full' }), development, layout };
+}
+
+/** What a release keeps; refused when the parts cannot be printed, for a revision is there to be cut. */
+export function freeze(airframe: Airframe): Result<Frozen> {
+  const frozen = compute(airframe);
+  const problems = layoutProblems(frozen.development, frozen.layout);
+  return problems.length > 0 ? refuse(...problems) : ok(frozen);
+}
+
+/** What to print: frozen artefacts as they were released, otherwise computed now. */
+export const artefactsOf = (file: ExportFile): Frozen => file.frozen ?? compute(file.airframe);
+
+const printed = ({ revision }: ExportFile): PrintedRevision | undefined =>
+  revision && { ...revision, releasedAt: revision.releasedAt.slice(0, 10) };
+
+/** The plan of a file on a paper by its id. */
+export async function planOf(file: ExportFile, artefacts: Frozen, paperId: string): Promise<Result<PlanFile>> {
+  const paper = paperById(paperId);
+  if (!paper) {
+    const message = fill(plan.problems.unknownPaper, { paper: paperId, known: Object.keys(PAPERS).join(', ') });
+    return refuse({ code: 'unknown-paper', path: 'paper', message });
+  }
+  return makePlan({
+    airframe: file.airframe,
+    ...artefacts,
+    paper,
+    revision: printed(file),
+    fonts: await readFonts(),
+  });
+}

@@ -1,0 +1,53 @@
+import { promisify } from 'node:util';
+import { gunzip, gzip } from 'node:zlib';
+import { artefactOf, artefactsOf } from '@/db/queries/revisions';
+import { ARTEFACT_KINDS, type ArtefactKind } from '@/db/schema';
+import type { Db } from '@/db/types';
+import type { Figures } from '@/lib/figures/types';
+import type { Frozen } from '@/lib/plan/job';
+import { sha256 } from './ids';
+
+const pack = promisify(gzip);
+const unpack = promisify(gunzip);
+
+export interface PackedArtefact {
+  readonly kind: ArtefactKind;
+  readonly body: Uint8Array;
+  /** Of the JSON text, so that it does not depend on how it was compressed. */
+  readonly sha256: string;
+}
+
+/** What is frozen, one compressed body a kind. */
+export async function packFrozen({ figures, development, layout }: Frozen): Promise<PackedArtefact[]> {
+  const contents: Record<ArtefactKind, unknown> = { figures, parts: development, layout };
+  return Promise.all(
+    ARTEFACT_KINDS.map(async (kind) => {
+      const text = JSON.stringify(contents[kind]);
+      return { kind, body: await pack(Buffer.from(text, 'utf8')), sha256: sha256(text) };
+    }),
+  );
+}
+
+/** JSON that `packFrozen` wrote. */
+async function unpackJson<T>(body: Uint8Array): Promise<T> {
+  return JSON.parse((await unpack(body)).toString('utf8'));
+}
+
+export async function frozenFigures(db: Db, revisionId: string): Promise<Figures> {
+  const body = await artefactOf(db, revisionId, 'figures');
+  if (body === undefined) throw new RangeError(`revision ${revisionId} has no frozen figures`);
+  return unpackJson<Figures>(body);
+}
+
+/** All that was frozen at the release; nothing of it is computed again. */
+export async function frozenOf(db: Db, revisionId: string): Promise<Frozen> {
+  const bodies = new Map((await artefactsOf(db, revisionId)).map(({ kind, body }) => [kind, body]));
+  const [figures, development, layout] = [bodies.get('figures'), bodies.get('parts'), bodies.get('layout')];
+  if (figures === undefined || development === undefined || layout === undefined)
+    throw new RangeError(`revision ${revisionId} has ${[...bodies.keys()].join(', ')} frozen, and not all of it`);
+  return {
+    figures: await unpackJson<Frozen['figures']>(figures),
+    development: await unpackJson<Frozen['development']>(development),
+    layout: await unpackJson<Frozen['layout']>(layout),
+  };
+}
