@@ -241,7 +241,8 @@ describe.each(cases)('$name', (entry) => {
   });
 
   it('reports half a millimetre planted at any corner of the surface', () => {
-    for (const part of parts) {
+    // A mirrored part is checked through its fellow.
+    for (const part of parts.filter(({ mirrorOf }) => !mirrorOf)) {
       const target = wanted(part);
       const { placement } = refold(part, target);
       if (!placement) throw new RangeError('not placed');

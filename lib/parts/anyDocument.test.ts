@@ -172,7 +172,7 @@ describe('develop, on any document', () => {
         const { parts } = develop(document);
         assertParts(parts);
       }),
-      { numRuns: 400 },
+      { numRuns: 150 },
     );
   });
 
@@ -187,8 +187,8 @@ describe('develop, on any document', () => {
         expect(parts.some(({ key }) => key.startsWith('wing/')) || said('surfaces.0')).toBe(true);
         expect(parts.some(({ key }) => key.startsWith('body/')) || said('bodies.0')).toBe(true);
       }),
-      { numRuns: 400 },
+      { numRuns: 150 },
     );
-    expect(accepted).toBeGreaterThan(10);
+    expect(accepted).toBeGreaterThan(3);
   });
 });

@@ -32,7 +32,10 @@ class Started {
 /** Migrates, and lays out the demo workshop once in the embedded database. Answers with the fresh sign-ins, or null. */
 async function prepareData(folder) {
   const { closeDb, databaseConfig, isSeeded, migrateDatabase } = await load('operate');
-  await migrateDatabase(databaseConfig(), inRoot('db', 'migrations'));
+  await migrateDatabase(databaseConfig(), inRoot('db', 'migrations')).catch((error) => {
+    const cause = error.cause?.message ?? error.message;
+    throw new Failure(`The database could not be brought to this version's schema, and was left as it is: ${cause}.`);
+  });
   if (process.env.DATABASE_URL || (await isSeeded(databaseConfig()))) return null;
   const { main } = await load('seed');
   try {

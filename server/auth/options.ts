@@ -1,4 +1,5 @@
 import type { BetterAuthOptions } from 'better-auth';
+import { APIError } from 'better-auth/api';
 import { PASSWORD_MAX, PASSWORD_MIN } from './password';
 
 const HOUR = 60 * 60;
@@ -18,6 +19,14 @@ export const authOptions = {
   logger: {
     level: 'error',
     log: (level, message) => console.error(JSON.stringify({ level, where: 'identity', message })),
+  },
+  onAPIError: {
+    // Refusals are the route's to log; what is left is a fault.
+    onError: (error) => {
+      if (error instanceof APIError && error.statusCode < 500) return;
+      const message = error instanceof Error ? error.message : String(error);
+      console.error(JSON.stringify({ level: 'error', where: 'identity', message }));
+    },
   },
   emailAndPassword: {
     enabled: true,

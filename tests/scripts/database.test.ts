@@ -1,21 +1,32 @@
 import { type ChildProcess, fork } from 'node:child_process';
-import { existsSync, mkdtempSync, rmSync } from 'node:fs';
+import { cpSync, existsSync, mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { dirname, join } from 'node:path';
 import { Client } from 'pg';
-import { afterEach, beforeAll, beforeEach, describe, expect, it } from 'vitest';
+import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { socketConfig } from '@/db/address';
 import { bundled, ensureBundles } from '@/scripts/lib/bundle.mjs';
 import { socketOf, startDatabase } from '@/scripts/lib/database.mjs';
 
 // The embedded database as it runs: a process of its own on a folder on the disk.
 
+// Making a database takes seconds; it is made once, and each test starts with a copy.
+let made: string;
 let folder: string;
 const children: ChildProcess[] = [];
 
-beforeAll(() => ensureBundles(), 120_000);
+const newFolder = () => mkdtempSync(join(tmpdir(), 'foldspar-data-'));
+
+beforeAll(async () => {
+  await ensureBundles();
+  made = newFolder();
+  await (await startDatabase(made)).stop();
+  rmSync(dirname(socketOf(made)), { recursive: true, force: true });
+}, 120_000);
+afterAll(() => rmSync(made, { recursive: true, force: true }));
 beforeEach(() => {
-  folder = mkdtempSync(join(tmpdir(), 'foldspar-data-'));
+  folder = newFolder();
+  cpSync(made, folder, { recursive: true });
 });
 afterEach(async () => {
   for (const child of children.splice(0)) {

@@ -34,13 +34,19 @@ export function distanceToRing(p: Vec2, ring: Ring): number {
   return least;
 }
 
-/** Whether two straight pieces cross each other at a point inside both. */
+/**
+ * Whether two straight pieces cross each other at a point inside both. Ends that lie on the other piece's line do not
+ * count: pieces of one line, far apart, would else cross by rounding.
+ */
 export function edgesCross(a: Vec2, b: Vec2, c: Vec2, d: Vec2): boolean {
-  const c1 = turnOf(a, b, c);
-  const c2 = turnOf(a, b, d);
-  const c3 = turnOf(c, d, a);
-  const c4 = turnOf(c, d, b);
-  return c1 > 0 !== c2 > 0 && c3 > 0 !== c4 > 0 && c1 !== 0 && c2 !== 0 && c3 !== 0 && c4 !== 0;
+  return partsEnds(a, b, c, d) && partsEnds(c, d, a, b);
+}
+
+/** Whether the line through a and b runs between c and d. */
+function partsEnds(a: Vec2, b: Vec2, c: Vec2, d: Vec2): boolean {
+  const on = NOTHING_MM * distance(a, b);
+  const [first, second] = [turnOf(a, b, c), turnOf(a, b, d)];
+  return (first > on && second < -on) || (first < -on && second > on);
 }
 
 /** The ring without repeated points, points on the line of their neighbours, and spikes. Keeps the first point unless it is one of these. */

@@ -6,7 +6,7 @@ import { unroll } from '../body/unroll';
 import { ARC_TOLERANCE_MM, arcPoints } from './arc';
 import { cutRing } from './cut';
 import { offsetLine } from './polyline';
-import { cleanRing, mirrorRing } from './ring';
+import { cleanRing, edgesCross, mirrorRing } from './ring';
 
 const sheet: Vec2[] = [
   [0, 0],
@@ -63,6 +63,23 @@ describe('rings', () => {
     expect(cleanRing(noisy)).toEqual(sheet);
     expect(signedArea(mirrorRing(sheet))).toBeCloseTo(signedArea(sheet), 12);
     expect(mirrorRing(sheet)[0]).toEqual([0, 0]);
+  });
+});
+
+describe('edges that cross', () => {
+  it('are not pieces of one line far apart, whatever rounding says of them', () => {
+    // Two pieces of one trailing edge, between them a notch; the products below round to opposite signs.
+    const line = [
+      [-40.16239536814436, -204.35610248304147],
+      [-8.636109732426046, -115.99133085970155],
+      [-7.136109732426047, -111.78699296317377],
+      [0.1969773088175283, -91.23314246581569],
+    ] satisfies Vec2[];
+    const [a, b, c, d] = line;
+    if (!a || !b || !c || !d) throw new RangeError('four points');
+    expect(edgesCross(a, b, c, d)).toBe(false);
+    expect(edgesCross([0, 0], [10, 4], [3, 5], [6, -2])).toBe(true);
+    expect(edgesCross([0, 0], [10, 4], [3, 5], [6, 3])).toBe(false);
   });
 });
 

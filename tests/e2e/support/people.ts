@@ -1,7 +1,9 @@
 import { expect, type Page } from '@playwright/test';
 import { auth } from '@/lib/text/en/pages';
 
-export type DemoName = 'Ines Okafor' | 'Piet Lindqvist' | 'Marguerite Adeyemi' | 'Tomas Reyes';
+/** Owner and designer, builder, reviewer, designer. */
+export const DEMO_NAMES = ['Ines Okafor', 'Piet Lindqvist', 'Marguerite Adeyemi', 'Tomas Reyes'] as const;
+export type DemoName = (typeof DEMO_NAMES)[number];
 
 export interface DemoSignIn {
   readonly email: string;

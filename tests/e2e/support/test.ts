@@ -31,6 +31,8 @@ function unexpected(seen: readonly string[], expected: readonly RegExp[]): strin
 
 interface Fixtures {
   readonly complaints: Complaints & { readonly watch: (context: BrowserContext) => void };
+  /** Opens a browser of its own, in which nobody is signed in. */
+  readonly openBrowser: () => Promise<Page>;
   /** Opens a browser of its own for a demo person and signs them in there. */
   readonly openAs: (name: DemoName) => Promise<Page>;
 }
@@ -55,16 +57,21 @@ export const test = base.extend<Fixtures>({
     },
     { auto: true },
   ],
-  openAs: async ({ browser, complaints }, use) => {
+  openBrowser: async ({ browser, complaints }, use) => {
     const contexts: BrowserContext[] = [];
-    await use(async (name) => {
+    await use(async () => {
       const context = await browser.newContext();
       contexts.push(context);
       complaints.watch(context);
-      const page = await context.newPage();
+      return context.newPage();
+    });
+    for (const context of contexts) await context.close();
+  },
+  openAs: async ({ openBrowser }, use) => {
+    await use(async (name) => {
+      const page = await openBrowser();
       await signIn(page, name);
       return page;
     });
-    for (const context of contexts) await context.close();
   },
 });
