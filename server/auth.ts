@@ -5,6 +5,7 @@ import { nextCookies } from 'better-auth/next-js';
 import { getDb } from '@/db/client';
 import { account, rateLimit, session, user, verification } from '@/db/schema';
 import type { Db } from '@/db/types';
+import { PersonName } from '@/lib/contract/bodies';
 import { texts as mails } from '@/lib/text/en/mail';
 import { texts } from '@/lib/text/en/server';
 import { fill } from '@/lib/text/fill';
@@ -13,16 +14,32 @@ import { passwordFault } from './auth/password';
 import { countTry, forgetTries } from './auth/throttle';
 import { newId } from './context';
 import { env } from './env';
-import { deliverMail, type Mail, queueMail } from './mail';
+import { deliverSoon, type Mail, queueMail } from './mail';
+
+const fieldOf = (body: unknown, key: string): unknown =>
+  typeof body === 'object' && body !== null ? Object.entries(body).find(([name]) => name === key)?.[1] : undefined;
 
 const textOf = (body: unknown, key: string): string | undefined => {
-  if (typeof body !== 'object' || body === null) return undefined;
-  const value: unknown = Object.entries(body).find(([name]) => name === key)?.[1];
+  const value = fieldOf(body, key);
   return typeof value === 'string' ? value : undefined;
 };
 
 /** Where a password is chosen; anywhere else it is only compared. */
 const CHOOSING = new Set(['/sign-up/email', '/reset-password', '/change-password', '/set-password']);
+
+/** Where people say who they are. The library takes any name of any length, and a picture from anywhere. */
+const NAMING = new Set(['/sign-up/email', '/update-user']);
+
+function assertNamed(body: unknown): void {
+  if (fieldOf(body, 'image') !== undefined)
+    throw new APIError('UNPROCESSABLE_ENTITY', {
+      code: 'UNKNOWN_FIELD',
+      message: fill(texts.details.unknownKey, { key: 'image' }),
+    });
+  const name = fieldOf(body, 'name');
+  if (name !== undefined && !PersonName.safeParse(name).success)
+    throw new APIError('UNPROCESSABLE_ENTITY', { code: 'NAME_NOT_ACCEPTED', message: texts.details.personName });
+}
 
 /** Refuses what the length rules of the library let through: first guesses, and tries without end. Forms and routes both pass here. */
 const before = (db: Db) =>
@@ -36,6 +53,7 @@ const before = (db: Db) =>
       const message = fill(texts.details.tooManyTries, { minutes: Math.ceil(wait / 60) });
       throw new APIError('TOO_MANY_REQUESTS', { code: 'TOO_MANY_TRIES', message }, { 'retry-after': String(wait) });
     }
+    if (NAMING.has(ctx.path)) assertNamed(body);
     if (!CHOOSING.has(ctx.path)) return;
     const password = textOf(body, 'newPassword') ?? textOf(body, 'password');
     if (password === undefined) return;
@@ -74,7 +92,7 @@ export function createAuth(db: Db) {
   const post = async (mail: Mail): Promise<void> => {
     const now = new Date();
     await queueMail(db, { now, newId }, mail);
-    await deliverMail(db, now);
+    deliverSoon(db, now);
   };
   return betterAuth({
     ...authOptions,
@@ -87,6 +105,8 @@ export function createAuth(db: Db) {
     }),
     advanced: {
       cookiePrefix: 'foldspar',
+      // Said although it is the default, because the library's own default in a test is to check nothing.
+      disableOriginCheck: false,
       database: { generateId: newId },
       ipAddress: { trustedProxies: [...settings.trustedProxies] },
     },
@@ -107,8 +127,8 @@ export function createAuth(db: Db) {
       sendOnSignUp: true,
       autoSignInAfterVerification: true,
       expiresIn: 60 * 60,
-      sendVerificationEmail: async ({ user: { name, email }, url }) => {
-        const text = fill(mails.verify.text, { name, url: afterVerifying(url) });
+      sendVerificationEmail: async ({ user: { email }, url }) => {
+        const text = fill(mails.verify.text, { url: afterVerifying(url) });
         await post({ kind: 'verify', recipient: email, subject: mails.verify.subject, text });
       },
     },

@@ -28,6 +28,8 @@ export interface ActContext {
   /** Where links in mails lead, e.g. "http://127.0.0.1:3000". */
   readonly baseUrl: string;
   readonly signal?: AbortSignal;
+  /** Throws unless the person may still do the act: a body can take minutes to arrive, and a computation to end. */
+  readonly proof?: (tx: Tx) => Promise<unknown>;
   readonly once?: Once;
 }
 
@@ -36,6 +38,7 @@ export const newId = (): string => randomUUID();
 /** One act, one transaction. The key of a repeated request is taken first, so a second run ends before it begins. */
 export function transact<T>(context: ActContext, work: (tx: Tx) => Promise<T>): Promise<T> {
   return context.db.transaction(async (tx) => {
+    await context.proof?.(tx);
     await context.once?.begin(tx);
     const result = await work(tx);
     await context.once?.end(tx, result);

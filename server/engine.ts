@@ -17,9 +17,10 @@ const cli = (): string => path.join(/* turbopackIgnore: true */ process.cwd(), '
 /**
  * Runs one job of the chain in a process of its own: the bundled command line, so that the server gives the same bytes as it does.
  * Stopped by signal after a minute or when the request is aborted; memory is capped by flag. Never call it inside a transaction.
+ * `by` is the person it is for, of whose jobs only so many may stand at once.
  */
-export function runEngine(request: JobRequest, signal?: AbortSignal): Promise<JobAnswer> {
-  return queued(() => fork(request, signal), signal);
+export function runEngine(request: JobRequest, signal?: AbortSignal, by?: string): Promise<JobAnswer> {
+  return queued(() => fork(request, signal), { signal, by });
 }
 
 function fork(request: JobRequest, signal: AbortSignal | undefined): Promise<JobAnswer> {

@@ -12,7 +12,11 @@ export async function whoOf(requestHeaders: Headers, now: Date = new Date()): Pr
   const found = await auth.api.getSession({ headers: requestHeaders });
   if (found === null || !found.user.emailVerified) return null;
   const ageSeconds = (now.getTime() - found.session.createdAt.getTime()) / 1000;
-  if (ageSeconds > SESSION_ABSOLUTE_SECONDS) return null;
+  if (ageSeconds > SESSION_ABSOLUTE_SECONDS) {
+    // Ended for good: the identity service looks at the last use alone and would go on taking it.
+    await (await auth.$context).internalAdapter.deleteSession(found.session.token);
+    return null;
+  }
   return { userId: found.user.id, name: found.user.name, email: found.user.email };
 }
 

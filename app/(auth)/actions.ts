@@ -6,10 +6,12 @@ import { redirect } from 'next/navigation';
 import { z } from 'zod';
 import { type FormState, textOf } from '@/components/auth/formState';
 import { nextPath } from '@/components/auth/nextPath';
+import { PersonName } from '@/lib/contract/bodies';
 import { ui, auth as words } from '@/lib/text/en/pages';
 import { fill } from '@/lib/text/fill';
 import { getAuth } from '@/server/auth';
 import { PASSWORD_MAX, PASSWORD_MIN } from '@/server/auth/password';
+import { logRefusal } from '@/server/http/refuse';
 import { originOf } from '@/server/origin';
 
 // Forms of identity. No answer tells whether an address has an account; only who knows the password learns more.
@@ -25,6 +27,11 @@ const failed = (values: FormState['values'], text: string): FormState => ({
 
 const emailFault = (email: string): string | undefined =>
   Email.safeParse(email).success ? undefined : words.notAnAddress;
+
+const nameFault = (name: string): string | undefined => {
+  if (name === '') return ui.required;
+  return PersonName.safeParse(name).success ? undefined : words.nameBad;
+};
 
 const passwordLengthFault = (password: string): string | undefined => {
   if (password.length < PASSWORD_MIN) return fill(words.short, { min: PASSWORD_MIN });
@@ -56,6 +63,7 @@ export async function signIn(_: FormState, data: FormData): Promise<FormState> {
     await auth.api.signInEmail({ body: { email: values.email, password }, ...(await asked('/sign-in/email')) });
   } catch (error) {
     if (!(error instanceof APIError)) throw error;
+    logRefusal('/sign-in', { status: error.statusCode, code: codeOf(error) });
     if (error.statusCode === 429) return failed(values, error.body?.message ?? words.tooMany);
     if (codeOf(error) === 'EMAIL_NOT_VERIFIED') return failed(values, words.notConfirmed);
     return failed(values, error.statusCode === 401 ? words.wrong : words.failed);
@@ -67,7 +75,7 @@ export async function signUp(_: FormState, data: FormData): Promise<FormState> {
   const values = { name: textOf(data, 'name').trim(), email: textOf(data, 'email').trim() };
   const password = textOf(data, 'password');
   const wrong = faults({
-    name: values.name === '' ? ui.required : undefined,
+    name: nameFault(values.name),
     email: emailFault(values.email),
     password: passwordLengthFault(password),
   });
@@ -78,6 +86,7 @@ export async function signUp(_: FormState, data: FormData): Promise<FormState> {
     await auth.api.signUpEmail({ body, ...(await asked('/sign-up/email')) });
   } catch (error) {
     if (!(error instanceof APIError)) throw error;
+    logRefusal('/sign-up', { status: error.statusCode, code: codeOf(error) });
     if (error.statusCode === 429) return failed(values, words.tooMany);
     if (codeOf(error).startsWith('PASSWORD_'))
       return refused(values, { password: error.body?.message ?? words.failed });
@@ -95,6 +104,7 @@ export async function forgot(_: FormState, data: FormData): Promise<FormState> {
     await auth.api.requestPasswordReset({ body: values, ...(await asked('/request-password-reset')) });
   } catch (error) {
     if (!(error instanceof APIError)) throw error;
+    logRefusal('/forgot', { status: error.statusCode, code: codeOf(error) });
     return failed(values, error.statusCode === 429 ? words.tooMany : words.failed);
   }
   return { values, fields: {}, message: { tone: 'good', text: words.forgotSent } };
@@ -110,6 +120,7 @@ export async function reset(_: FormState, data: FormData): Promise<FormState> {
     await auth.api.resetPassword({ body, ...(await asked('/reset-password')) });
   } catch (error) {
     if (!(error instanceof APIError)) throw error;
+    logRefusal('/reset', { status: error.statusCode, code: codeOf(error) });
     if (error.statusCode === 429) return failed({}, words.tooMany);
     if (codeOf(error).startsWith('PASSWORD_')) return refused({}, { password: error.body?.message ?? words.failed });
     return failed({}, words.resetBad);

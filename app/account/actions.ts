@@ -5,18 +5,19 @@ import { revalidatePath } from 'next/cache';
 import { cookies, headers } from 'next/headers';
 import { redirect } from 'next/navigation';
 import { type FormState, textOf } from '@/components/auth/formState';
+import { PersonName } from '@/lib/contract/bodies';
 import { lookFrom } from '@/lib/look/css';
 import { auth as authWords, ui, account as words } from '@/lib/text/en/pages';
 import { getAuth } from '@/server/auth';
 import { requireWho } from '@/server/session';
 
-const NAME_MAX = 80;
 const YEAR_SECONDS = 365 * 24 * 60 * 60;
 
 export async function saveName(_: FormState, data: FormData): Promise<FormState> {
   await requireWho();
   const values = { name: textOf(data, 'name').trim() };
-  if (values.name === '' || values.name.length > NAME_MAX) return { values, fields: { name: ui.required } };
+  if (values.name === '') return { values, fields: { name: ui.required } };
+  if (!PersonName.safeParse(values.name).success) return { values, fields: { name: authWords.nameBad } };
   try {
     const auth = await getAuth();
     await auth.api.updateUser({ body: values, headers: await headers() });

@@ -1,7 +1,10 @@
 import type { Vec2 } from '@/lib/numerics/vec';
 import { frameAround, pathData } from './frame';
 
-/** A design's own picture, drawn from its outlines; nothing but lines, so that it prints and darkens with the page. */
+/**
+ * A design's own picture, drawn from its outlines; nothing but lines, so that it prints and darkens with the page.
+ * An empty label says that the words beside it say the same.
+ */
 export function Thumbnail({
   outlines,
   label,
@@ -18,6 +21,7 @@ export function Thumbnail({
         className="size-full text-ink"
         role="img"
         aria-label={label}
+        aria-hidden={label === ''}
       >
         {outlines.map((points, index) => (
           <path

@@ -1,6 +1,6 @@
-import { existsSync, mkdirSync } from 'node:fs';
+import { chmodSync, existsSync, mkdirSync } from 'node:fs';
 import { statfs } from 'node:fs/promises';
-import { dirname, join } from 'node:path';
+import { join } from 'node:path';
 import { PGlite } from '@electric-sql/pglite';
 import { openGateway } from './gateway';
 import { lockFolder } from './lock';
@@ -38,7 +38,9 @@ export interface Embedded {
 
 async function openDatabase(folder: string): Promise<PGlite> {
   const fresh = !existsSync(join(folder, 'PG_VERSION'));
-  mkdirSync(dirname(folder), { recursive: true, mode: 0o700 });
+  mkdirSync(folder, { recursive: true, mode: 0o700 });
+  // A folder around it that was made by hand may be open to others; what is in here are sessions and hashes.
+  chmodSync(folder, 0o700);
   const database = await PGlite.create({ dataDir: folder, postgresqlconf: SETTINGS });
   if (fresh) await syncData(folder, 0);
   return database;

@@ -1,9 +1,8 @@
-import { bigint, boolean, index, integer, pgTable, text, timestamp } from 'drizzle-orm/pg-core';
+import { bigint, boolean, index, integer, pgTable, text } from 'drizzle-orm/pg-core';
+import { at } from './columns';
 
 // Identity and sessions, in the shape that better-auth works with: property names are its field names, column names are ours.
 // tests/db/authTables.test.ts holds the two together. Nothing else of ours lives here; workshops stand in workshop.ts.
-
-const at = (name: string) => timestamp(name, { withTimezone: true, mode: 'date' });
 
 export const user = pgTable('user', {
   id: text('id').primaryKey(),

@@ -1,10 +1,9 @@
 import { sql } from 'drizzle-orm';
-import { check, doublePrecision, index, integer, jsonb, pgTable, text, timestamp, unique } from 'drizzle-orm/pg-core';
+import { check, doublePrecision, index, integer, jsonb, pgTable, text, unique } from 'drizzle-orm/pg-core';
 import type { Thumbnail } from '@/lib/contract/answers';
 import { user } from './auth';
+import { at } from './columns';
 import { workshop } from './workshop';
-
-const at = (name: string) => timestamp(name, { withTimezone: true, mode: 'date' });
 
 /** `draftVersion` names the newest draft save; the columns after it are worked out from that save so that a list needs no airframe. */
 export const design = pgTable(
@@ -26,7 +25,10 @@ export const design = pgTable(
     massG: doublePrecision('mass_g'),
     thumbnail: jsonb('thumbnail').$type<Thumbnail>().notNull(),
   },
-  (table) => [index('design_workshop_idx').on(table.workshopId, table.updatedAt)],
+  (table) => [
+    unique('design_in_workshop').on(table.id, table.workshopId),
+    index('design_workshop_idx').on(table.workshopId, table.updatedAt),
+  ],
 );
 
 /** Append-only: a save is never changed or removed, so nothing that was drawn is lost. The body is text: parsing jsonb costs more than storing it. */

@@ -1,10 +1,9 @@
 import { sql } from 'drizzle-orm';
-import { check, index, integer, jsonb, pgTable, primaryKey, text, timestamp } from 'drizzle-orm/pg-core';
+import { check, index, integer, jsonb, pgTable, primaryKey, text } from 'drizzle-orm/pg-core';
 import { user } from './auth';
+import { at } from './columns';
 import { design } from './design';
 import { revision } from './revision';
-
-const at = (name: string) => timestamp(name, { withTimezone: true, mode: 'date' });
 
 /** Who did what, written in the same transaction as the act. No foreign keys: the record outlives what it tells of. */
 export const auditEvent = pgTable(

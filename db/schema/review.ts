@@ -1,10 +1,9 @@
 import { sql } from 'drizzle-orm';
-import { boolean, check, integer, jsonb, pgTable, text, timestamp, unique } from 'drizzle-orm/pg-core';
+import { boolean, check, integer, jsonb, pgTable, text, unique } from 'drizzle-orm/pg-core';
 import type { Anchor, VerdictKind } from '@/lib/contract/bodies';
 import { user } from './auth';
+import { at } from './columns';
 import { revision } from './revision';
-
-const at = (name: string) => timestamp(name, { withTimezone: true, mode: 'date' });
 
 /** Pinned to a place, element, part, figure, sheet or rule of one revision; numbered within it. */
 export const commentThread = pgTable(

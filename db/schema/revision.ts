@@ -7,14 +7,12 @@ import {
   integer,
   pgTable,
   text,
-  timestamp,
   unique,
 } from 'drizzle-orm/pg-core';
 import type { RevisionState } from '@/lib/contract/answers';
 import { user } from './auth';
+import { at } from './columns';
 import { design } from './design';
-
-const at = (name: string) => timestamp(name, { withTimezone: true, mode: 'date' });
 
 /** Bytes as the drivers give them: one answers with a Buffer, the other with a plain array. */
 const bytes = customType<{ data: Uint8Array; driverData: Uint8Array }>({ dataType: () => 'bytea' });
@@ -49,6 +47,7 @@ export const revision = pgTable(
   },
   (table) => [
     unique('revision_number').on(table.designId, table.number),
+    unique('revision_in_design').on(table.id, table.designId),
     check('revision_state', sql`${table.state} in ('released', 'goodToCut', 'held')`),
   ],
 );
@@ -56,14 +55,14 @@ export const revision = pgTable(
 export const ARTEFACT_KINDS = ['figures', 'parts', 'layout'] as const;
 export type ArtefactKind = (typeof ARTEFACT_KINDS)[number];
 
-/** What the engine worked out at the release, gzip of JSON. A page reprinted in a year must match its neighbours, so it is read and never computed again. */
+/** What the engine worked out at the release, gzip of JSON. A page reprinted in a year must match its neighbours, so it is read and never computed again, and neither it nor its revision goes along with something else that is removed. */
 export const artefact = pgTable(
   'artefact',
   {
     id: text('id').primaryKey(),
     revisionId: text('revision_id')
       .notNull()
-      .references(() => revision.id, { onDelete: 'cascade' }),
+      .references(() => revision.id, { onDelete: 'restrict' }),
     kind: text('kind').$type<ArtefactKind>().notNull(),
     engine: text('engine').notNull(),
     body: bytes('body').notNull(),

@@ -1,9 +1,9 @@
 import { sql } from 'drizzle-orm';
-import { check, index, pgTable, text, timestamp, unique } from 'drizzle-orm/pg-core';
+import { check, index, pgTable, text, unique } from 'drizzle-orm/pg-core';
 import type { Role } from '@/lib/contract/roles';
 import { user } from './auth';
+import { at } from './columns';
 
-const at = (name: string) => timestamp(name, { withTimezone: true, mode: 'date' });
 const rolesHold = sql.raw(
   `cardinality("roles") > 0 and "roles" <@ array['owner','designer','builder','reviewer']::text[]`,
 );

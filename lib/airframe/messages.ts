@@ -11,6 +11,10 @@ import { knownKeys, nearest } from './knownKeys';
 type Issue = z.core.$ZodIssue;
 const words = texts.problems;
 
+/** Comparing a word with every known one takes its time; a slip is short, and of thousands nobody reads the rest. */
+const MAX_GUESSES = 50;
+const LONGEST_WORD = 64;
+
 const UNITS: readonly (readonly [suffix: string, unit: string])[] = [
   ['Gm2', ' g/m²'],
   ['PerMetreG', ' g/m'],
@@ -117,9 +121,10 @@ function unknownKeys(
 ): Problem[] {
   const known = knownKeys(schema, document, at.path);
   const where = at.path.length === 0 ? '' : ` in ${fieldName(at.path)}`;
-  return issue.keys.map((key) => {
-    const near = nearest(key, known);
-    const fix = near ? fill(words.didYouMean, { key: near }) : fill(words.removeKey, { keys: known.join(', ') });
+  const remove = fill(words.removeKey, { keys: known.join(', ') });
+  return issue.keys.map((key, index) => {
+    const near = index < MAX_GUESSES && key.length <= LONGEST_WORD ? nearest(key, known) : null;
+    const fix = near ? fill(words.didYouMean, { key: near }) : remove;
     return make('unknown-key', { ...at, path: [...at.path, key] }, fill(words.unknownKey, { key, where }), fix);
   });
 }

@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { startFrom } from '@/lib/airframe/layouts';
 import { resolve } from '@/lib/airframe/resolve';
 import type { Airframe } from '@/lib/airframe/schema/airframe';
+import { develop } from '@/lib/parts/develop';
 import type { Development, Operation, Part, StockPiece } from '@/lib/parts/types';
 import { balance } from './balance';
 import { massList } from './masses';
@@ -119,6 +120,39 @@ describe('mass list', () => {
       ['a/glue', 0.3],
       ['a/tape', 0.25],
     ]);
+  });
+  it('weighs a joint that both its parts mark once: the trainer’s wing halves meet along 190 mm', () => {
+    const trainer = startFrom('trainer', 'Test');
+    const made = develop(trainer);
+    const marked = made.parts.flatMap(({ key, operations }) =>
+      operations.filter(({ id }) => id === 'root-glue').map(() => key),
+    );
+    expect(marked).toEqual(['wing/p1/sheet/stbd', 'wing/p1/sheet/port']);
+    const lines = list(made, trainer).filter(({ key }) => /^wing.*sheet.*glue$/.test(key));
+    // Root chord 190 mm at 8 g/m; 2 degrees of dihedral a side leave its length alone.
+    expect(sum(lines)).toBeCloseTo(0.19 * 8, 4);
+    expect(balance(lines).cg[1]).toBeCloseTo(0, 9);
+  });
+  it('weighs the tape over a hinge once, though wing and aileron both show it', () => {
+    const taped: Airframe = {
+      ...base,
+      surfaces: base.surfaces.map((surface) => ({
+        ...surface,
+        controls: surface.controls.map((control) => ({
+          ...control,
+          hinge: { ...control.hinge, kind: surface.id === 'wing' ? ('tape' as const) : control.hinge.kind },
+        })),
+      })),
+    };
+    const lines = list(develop(taped), taped).filter(({ key }) => key.endsWith('/tape'));
+    expect(lines.map(({ key }) => key)).toEqual([
+      'wing/p1/sheet/centre/tape',
+      'wing/aileron/control/stbd/tape',
+      'wing/aileron/control/port/tape',
+    ]);
+    // Two strips of 48 mm at 50 g/m2 along hinges 154 mm long, less the gaps at the ailerons' ends.
+    expect(sum(lines)).toBeGreaterThan(2 * 0.15 * 0.048 * 50);
+    expect(sum(lines)).toBeLessThan(2 * 0.155 * 0.048 * 50);
   });
   it('falls back on a share of the foam when no part marks glue', () => {
     const lines = list({ parts: [part('a', {})] });

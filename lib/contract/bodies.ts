@@ -35,6 +35,9 @@ export const RoleSet = z
   .max(ROLES.length)
   .refine((roles) => new Set(roles).size === roles.length, 'each role once');
 
+/** What a person calls themselves. It stands in mails and on prints. */
+export const PersonName = line(80);
+
 export const CreateWorkshop = z.strictObject({ name: line(80) });
 export const RenameWorkshop = z.strictObject({ name: line(80) });
 export const SetRoles = z.strictObject({ roles: RoleSet });

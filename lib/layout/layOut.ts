@@ -19,6 +19,10 @@ import type { LaidSheet, LayoutFailure, LayoutOptions, SheetLayout, SheetStock }
 /** Two thicknesses closer than this, mm, are one kind of sheet: a document writes them to a hundredth at best. */
 const SAME_THICKNESS_MM = 0.005;
 
+/** More is beyond any airframe that is cut by hand, and would keep a computer busy for minutes. */
+export const MAX_PARTS = 2000;
+export const MAX_SHEETS = 200;
+
 const areaOf = (ring: readonly Vec2[]): number => {
   let twice = 0;
   ring.forEach(([x, y], i) => {
@@ -76,7 +80,9 @@ function runOnce(jobs: readonly Job[], stock: readonly SheetStock[], bench: Benc
       (kind) => kind.count === null || sheets.filter((sheet) => sheet.stock === kind).length < kind.count,
     );
     const next = left[0];
-    if (next) {
+    if (next && sheets.length >= MAX_SHEETS) {
+      failures.push({ kind: 'too-many-sheets', partKey: part.key, most: MAX_SHEETS });
+    } else if (next) {
       sheets.push(startSheet(job, next, bench, keepSquare));
     } else if (large.length === 0) {
       failures.push({ kind: 'too-large', partKey: part.key, sizeMm: job.boxMm });
@@ -131,11 +137,17 @@ function checkOptions({ spacingMm, marginMm }: LayoutOptions): void {
  * along the grain where both have one, and are never mirrored. A 100 mm test square goes into each sheet's waste
  * when it costs no further sheet.
  * The same input gives the same layout; the seed is kept with the layout and this method draws no random number from it.
- * Parts that find no place are returned as failures, each once, and lie on no sheet.
+ * Parts that find no place are returned as failures, each once, and lie on no sheet. Over `MAX_PARTS` parts nothing is laid
+ * and one failure says so; over `MAX_SHEETS` sheets the parts left are failures.
  */
 export function layOut(parts: readonly Part[], stock: readonly SheetStock[], options: LayoutOptions): SheetLayout {
   checkOptions(options);
   if (new Set(parts.map(({ key }) => key)).size !== parts.length) throw new RangeError('two parts share a key');
+  const over = parts[MAX_PARTS];
+  if (over) {
+    const failure = { kind: 'too-many-parts', partKey: over.key, count: parts.length, most: MAX_PARTS } as const;
+    return { options, sheets: [], failures: [failure] };
+  }
   const shapes = new Map<string, Shape>();
   const bench: Bench = {
     options,

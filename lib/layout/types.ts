@@ -43,7 +43,10 @@ export interface LaidSheet {
 export type LayoutFailure =
   | { readonly kind: 'too-large'; readonly partKey: string; readonly sizeMm: Vec2 }
   | { readonly kind: 'no-stock'; readonly partKey: string; readonly materialId: string }
-  | { readonly kind: 'no-room'; readonly partKey: string; readonly sheetsTried: number };
+  | { readonly kind: 'no-room'; readonly partKey: string; readonly sheetsTried: number }
+  /** Nothing was laid: `partKey` is the first part over the limit. */
+  | { readonly kind: 'too-many-parts'; readonly partKey: string; readonly count: number; readonly most: number }
+  | { readonly kind: 'too-many-sheets'; readonly partKey: string; readonly most: number };
 
 export interface SheetLayout {
   readonly options: LayoutOptions;

@@ -6,10 +6,11 @@ import { length3, sub3 } from '@/lib/numerics/vec';
 import { texts } from '@/lib/text/en/parts';
 import { fill } from '@/lib/text/fill';
 import { bodyParts } from './body/bodyParts';
+import { withMarks } from './marks/withMarks';
 import type { BoomHere } from './surface/boom';
 import { tooLong } from './surface/spar';
 import { type Developed, surfaceParts } from './surface/surfaceParts';
-import type { Development, StockPiece } from './types';
+import type { Development, Part, StockPiece } from './types';
 import { partFault } from './validate';
 
 const byId = <T extends { readonly id: string }>(list: readonly T[]): ReadonlyMap<string, T> =>
@@ -35,17 +36,24 @@ function boomPieces(booms: readonly BoomHere[], airframe: Airframe): { pieces: S
 
 /** Nothing leaves here that a blade cannot follow: such a part is left out and named at its element. */
 function cuttable(made: Developed, path: string): Developed {
-  const faults = made.parts.flatMap((part): Problem[] => {
+  const parts: Part[] = [];
+  const faults: Problem[] = [];
+  for (const part of made.parts) {
     const fault = partFault(part);
-    if (!fault) return [];
+    if (!fault) {
+      parts.push(part);
+      continue;
+    }
     const message = fill(texts.problems.partCannotBeCut, { part: part.name, fault });
-    return [{ code: 'part-cannot-be-cut', path, message, fix: texts.problems.partCannotBeCutFix }];
-  });
-  if (faults.length === 0) return made;
-  return { ...made, parts: made.parts.filter((part) => !partFault(part)), problems: [...made.problems, ...faults] };
+    faults.push({ code: 'part-cannot-be-cut', path, message, fix: texts.problems.partCannotBeCutFix });
+  }
+  return faults.length === 0 ? made : { ...made, parts, problems: [...made.problems, ...faults] };
 }
 
-/** As `develop`, for a caller that has the resolved airframe already. */
+/**
+ * As `develop`, for a caller that has the resolved airframe already and reads no marks: the same parts, cut and folded alike,
+ * without labels, grain arrows and pin points. `withMarks` adds those.
+ */
 export function developResolved(airframe: Airframe, resolved: ResolvedAirframe): Development {
   const stock = { materials: byId(airframe.materials), tubes: byId(airframe.tubes) };
   const boomsById = byId(airframe.booms);
@@ -78,5 +86,6 @@ export function developResolved(airframe: Airframe, resolved: ResolvedAirframe):
 export function develop(airframe: Airframe): Development {
   const resolved = resolve(airframe);
   if (!resolved.ok) return { parts: [], stockPieces: [], problems: resolved.problems };
-  return developResolved(airframe, resolved.value);
+  const development = developResolved(airframe, resolved.value);
+  return { ...development, parts: withMarks(development.parts) };
 }

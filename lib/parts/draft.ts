@@ -1,9 +1,6 @@
 import type { Material } from '@/lib/airframe/schema/stock';
 import type { Vec2 } from '@/lib/numerics/vec';
-import { grainArrow } from './marks/grain';
-import { partLabels } from './marks/labels';
-import { registerMarks } from './marks/register';
-import { roomIn } from './marks/room';
+import { cutsFace } from './marks/withMarks';
 import { mirrorFrame } from './shape/frame';
 import { mirror2, mirrorRing } from './shape/ring';
 import type { Face, Operation, Part, PartFrame } from './types';
@@ -46,10 +43,6 @@ const otherSide = (draft: Draft): Draft => ({
   frame: mirrorFrame(draft.frame),
 });
 
-/** Work that a face decides: marks and glue can be read from either. */
-const cutsFace = ({ kind }: Operation): boolean =>
-  kind === 'cutToPaper' || kind === 'crease' || kind === 'bevel' || kind === 'foamOut' || kind === 'paperOff';
-
 /** A part is drawn on the face where most of its work is, so that a template is glued where the knife goes. */
 function onWorkedFace(draft: Draft): Draft {
   const work = draft.operations.filter(cutsFace);
@@ -57,45 +50,34 @@ function onWorkedFace(draft: Draft): Draft {
   return back > work.length - back ? turnedOver(draft) : draft;
 }
 
-function finish(draft: Draft, side: Part['side'], count: { index: number; of: number }, mirrorOf?: string): Part {
-  const grainDeg = draft.material.grain === 'none' ? null : draft.grainDeg;
-  const twoFaced = draft.operations.some((operation) => cutsFace(operation) && operation.face === draft.faces[1]);
-  const name = draft.name(side);
-  const shape = { outline: draft.outline, holes: draft.holes };
-  const room = roomIn(draft.outline, draft.holes);
+function finish(draft: Draft, side: Part['side'], mirrorOf?: string): Part {
   return {
     key: `${draft.key}/${side}`,
-    name,
+    name: draft.name(side),
     elementId: draft.elementId,
     side,
     materialId: draft.material.id,
     thicknessMm: draft.material.thicknessMm,
     ...(mirrorOf ? { mirrorOf } : {}),
     face: draft.faces[0],
-    ...shape,
-    operations: [
-      ...draft.operations,
-      ...(grainDeg === null ? [] : grainArrow(room, grainDeg, draft.faces[0])),
-      ...(twoFaced ? registerMarks(room.places, draft.faces[0]) : []),
-    ],
-    labels: partLabels(room, name, { ...count, twoFaced }),
-    grainDeg,
+    outline: draft.outline,
+    holes: draft.holes,
+    operations: draft.operations,
+    labels: [],
+    grainDeg: draft.material.grain === 'none' ? null : draft.grainDeg,
     frame: draft.frame,
   };
 }
 
 /** One part on the centre line. */
-export const centrePart = (draft: Draft): Part => finish(onWorkedFace(draft), 'centre', { index: 1, of: 1 });
+export const centrePart = (draft: Draft): Part => finish(onWorkedFace(draft), 'centre');
 
 /** One part on a side, without a mirrored fellow. */
 export const sidePart = (draft: Draft, side: 'stbd' | 'port'): Part =>
-  finish(onWorkedFace(side === 'port' ? otherSide(draft) : draft), side, { index: 1, of: 1 });
+  finish(onWorkedFace(side === 'port' ? otherSide(draft) : draft), side);
 
 /** The starboard part and its true mirror on the port side. */
 export function bothSides(draft: Draft): Part[] {
   const worked = onWorkedFace(draft);
-  return [
-    finish(worked, 'stbd', { index: 1, of: 2 }),
-    finish(otherSide(worked), 'port', { index: 2, of: 2 }, `${draft.key}/stbd`),
-  ];
+  return [finish(worked, 'stbd'), finish(otherSide(worked), 'port', `${draft.key}/stbd`)];
 }

@@ -35,6 +35,8 @@ export interface Operation {
   readonly widthMm?: number;
   /** How deep it goes from the worked face; absent: as deep as the kind says. */
   readonly depthMm?: number;
+  /** Glue and tape: on how many parts the same joint is marked, when on more than this one; each holds its share of the mass. */
+  readonly sharedBy?: number;
   readonly note?: string;
 }
 

@@ -4,8 +4,9 @@ import { AIRFRAME_FORMAT } from '@/lib/airframe/schema/airframe';
 import { ok, type Problem, type Result, refuse } from '@/lib/numerics/result';
 import { plan } from '@/lib/text/en/plan';
 import { fill } from '@/lib/text/fill';
+import type { PlanRevision } from './drawing';
 import { FrozenShape } from './frozenSchema';
-import type { ExportFile, PlanRevision } from './job';
+import type { ExportFile } from './job';
 
 const words = plan.file;
 

@@ -44,6 +44,7 @@ const part = z.object({
       angleDeg: z.number().optional(),
       widthMm: z.number().optional(),
       depthMm: z.number().optional(),
+      sharedBy: z.number().optional(),
       note: name.optional(),
     }),
   ),
@@ -66,6 +67,8 @@ const failure = z.discriminatedUnion('kind', [
   z.object({ kind: z.literal('too-large'), partKey: name, sizeMm: point }),
   z.object({ kind: z.literal('no-stock'), partKey: name, materialId: name }),
   z.object({ kind: z.literal('no-room'), partKey: name, sheetsTried: z.number() }),
+  z.object({ kind: z.literal('too-many-parts'), partKey: name, count: z.number(), most: z.number() }),
+  z.object({ kind: z.literal('too-many-sheets'), partKey: name, most: z.number() }),
 ]);
 
 const layout = z.object({

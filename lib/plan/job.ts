@@ -3,6 +3,7 @@ import type { Figures } from '@/lib/figures/types';
 import type { SheetLayout } from '@/lib/layout/types';
 import type { Problem } from '@/lib/numerics/result';
 import type { Development } from '@/lib/parts/types';
+import type { PlanRevision } from './drawing';
 import type { Manifest } from './manifest';
 
 // What the server asks of the bundled command line (`dist/cli.mjs job`): one JobRequest as JSON on standard input, one JobAnswer as JSON on
@@ -13,15 +14,6 @@ export interface Frozen {
   readonly figures: Figures;
   readonly development: Development;
   readonly layout: SheetLayout;
-}
-
-/** What a released plan says of its origin; without it every page says "draft". */
-export interface PlanRevision {
-  readonly number: number;
-  readonly state: 'released' | 'goodToCut' | 'held';
-  /** ISO 8601, UTC. */
-  readonly releasedAt: string;
-  readonly design: string;
 }
 
 export type JobRequest =

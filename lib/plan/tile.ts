@@ -1,9 +1,10 @@
 import type { Figures } from '@/lib/figures/types';
+import type { BuildNotes } from './buildNotes';
 import type { Drawing, Paper, PlanRevision } from './drawing';
 import type { ExpectedLines } from './expected';
 import type { Manifest, ManifestSheet, PlanFile } from './manifest';
-import { coverPages } from './pdf/cover';
 import type { PlanFonts } from './pdf/fonts';
+import { frontPages } from './pdf/front';
 import { writePdf } from './pdf/writePdf';
 import { checkPaper, formatsOf, TILE_DEFAULTS, type TileOptions } from './tiling/format';
 import { type TiledSheet, tileSheets } from './tiling/tileSheets';
@@ -17,6 +18,8 @@ export interface TileContext {
   readonly expected: ExpectedLines;
   readonly fonts: PlanFonts;
   readonly notDrawn?: readonly string[];
+  /** What to gather and set, on the first page. */
+  readonly build?: BuildNotes;
   readonly options?: TileOptions;
 }
 
@@ -64,25 +67,27 @@ export async function tile(drawings: readonly Drawing[], paper: Paper, context: 
   if (problem) throw new RangeError(problem.message);
   const sheets = tileSheets(drawings, paper, options);
   const [coverFormat] = formatsOf(paper, options);
-  const before = coverPages(sheets.length);
+  const front = frontPages(coverFormat, {
+    sheets,
+    figures: context.figures,
+    build: context.build ?? null,
+    notDrawn: context.notDrawn ?? [],
+    overlapMm: options.overlapMm,
+  });
+  const before = front.length;
   const manifest: Manifest = {
     version: 1,
     units: 'mm',
-    otherPages: Array.from({ length: before }, (_, i) => ({
-      page: i + 1,
-      kind: 'cover' as const,
-      media_mm: coverFormat.mediaMm,
-    })),
+    otherPages: front.map(({ kind }, i) => ({ page: i + 1, kind, media_mm: coverFormat.mediaMm })),
     sheets: sheets.map((sheet) => manifestSheet(sheet, context.expected, before + 1, options.overlapMm)),
   };
   const pages = before + sheets.reduce((sum, sheet) => sum + sheet.pages.length, 0);
   const pdf = await writePdf({
     sheets,
+    front,
     coverFormat,
     options,
     names: { design: context.design, revision: context.revision, pages },
-    figures: context.figures,
-    notDrawn: context.notDrawn ?? [],
     fonts: context.fonts,
     manifest,
   });

@@ -4,7 +4,6 @@ import { layOut } from '@/lib/layout/layOut';
 import { LAYOUT_DEFAULTS, stockOf } from '@/lib/layout/stock';
 import { ok, type Result, refuse } from '@/lib/numerics/result';
 import { develop } from '@/lib/parts/develop';
-import type { PlanRevision as PrintedRevision } from '@/lib/plan/drawing';
 import type { ExportFile, Frozen } from '@/lib/plan/job';
 import { layoutProblems, makePlan } from '@/lib/plan/makePlan';
 import type { PlanFile } from '@/lib/plan/manifest';
@@ -30,9 +29,6 @@ export function freeze(airframe: Airframe): Result<Frozen> {
 /** What to print: frozen artefacts as they were released, otherwise computed now. */
 export const artefactsOf = (file: ExportFile): Frozen => file.frozen ?? compute(file.airframe);
 
-const printed = ({ revision }: ExportFile): PrintedRevision | undefined =>
-  revision && { ...revision, releasedAt: revision.releasedAt.slice(0, 10) };
-
 /** The plan of a file on a paper by its id. */
 export async function planOf(file: ExportFile, artefacts: Frozen, paperId: string): Promise<Result<PlanFile>> {
   const paper = paperById(paperId);
@@ -44,7 +40,7 @@ export async function planOf(file: ExportFile, artefacts: Frozen, paperId: strin
     airframe: file.airframe,
     ...artefacts,
     paper,
-    revision: printed(file),
+    revision: file.revision,
     fonts: await readFonts(),
   });
 }

@@ -21,7 +21,7 @@ export async function sheets(args: readonly string[]): Promise<number> {
   const artefacts = artefactsOf(file.value);
   const printed = await planOf(file.value, artefacts, paper);
   if (!printed.ok) return reportProblems(printed.problems);
-  const drawn = drawSheets(artefacts.development, artefacts.layout);
+  const drawn = drawSheets(file.value.airframe, artefacts.development, artefacts.layout);
   if (!drawn.ok) return reportProblems(drawn.problems);
   for (const problem of artefacts.development.problems) {
     process.stderr.write(`${fill(plan.cli.warning, { message: inWords(problem) })}\n`);

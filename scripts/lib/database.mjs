@@ -15,10 +15,14 @@ const STOP_MS = 4_000;
 const MOST_RESTARTS = 5;
 const WITHIN_MS = 60_000;
 
-/** A path under 100 characters, which is as long as a unix socket's may be, the same at every start. */
+/** Longest path of a unix socket on every system that has them. */
+const LONGEST_SOCKET = 100;
+
+/** Where the database of this data folder listens: the same at every start. */
 export function socketOf(folder) {
   const name = createHash('sha256').update(folder).digest('hex').slice(0, 16);
-  return join(tmpdir(), `foldspar-${name}`, '.s.PGSQL.5432');
+  const path = join(tmpdir(), `foldspar-${name}`, '.s.PGSQL.5432');
+  return path.length <= LONGEST_SOCKET ? path : join('/tmp', `foldspar-${name}`, '.s.PGSQL.5432');
 }
 
 function startProcess(folder, socket, program, timing) {

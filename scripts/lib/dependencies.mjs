@@ -7,9 +7,13 @@ import { run, runNode } from './run.mjs';
 
 const STAMP = inRoot('node_modules', '.foldspar-lock');
 
-/** Whether node_modules holds the lock's packages already, put there by hand. Packages for other systems may be missing. */
-function standsAlready(lock) {
-  const hidden = textOf(inRoot('node_modules', '.package-lock.json'));
+/**
+ * Whether the packages that npm's own record of node_modules names are the lock's, put there by hand. Packages for other
+ * systems may be missing.
+ * @param {string} lock
+ * @param {string | null} hidden
+ */
+export function standsAlready(lock, hidden = textOf(inRoot('node_modules', '.package-lock.json'))) {
   if (hidden === null) return false;
   const present = JSON.parse(hidden).packages;
   return Object.entries(JSON.parse(lock).packages).every(

@@ -15,7 +15,10 @@ function listen(port, host) {
 /** A port that was free a moment ago. */
 export const freePort = (host = '127.0.0.1') => listen(0, host);
 
-/** Reads PORT; throws a Failure on what is no port. */
+/**
+ * Reads PORT; throws a Failure on what is no port.
+ * @param {Record<string, string | undefined>} env
+ */
 export function portOf(env = process.env) {
   const text = env.PORT || '3000';
   const port = Number(text);

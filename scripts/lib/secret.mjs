@@ -3,7 +3,11 @@ import { mkdirSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { textOf } from './files.mjs';
 
-/** The secret that signs sessions: the configured one, or one made at the first start and kept in the data folder. */
+/**
+ * The secret that signs sessions: the configured one, or one made at the first start and kept in the data folder.
+ * @param {string} folder
+ * @param {Record<string, string | undefined>} env
+ */
 export function ensureSecret(folder, env = process.env) {
   if (env.FOLDSPAR_SECRET) return env.FOLDSPAR_SECRET;
   const path = join(folder, 'secret');

@@ -4,6 +4,7 @@ import { manage } from './managed.mjs';
 import { nextProgram } from './pages.mjs';
 import { inRoot, root } from './root.mjs';
 
+const PRELOADED = ['endWithParent.mjs', 'peerAddress.mjs'];
 const STOP_MS = 5_000;
 const READY_MS = 60_000;
 const ASK_EVERY_MS = 100;
@@ -40,7 +41,7 @@ export async function startServer({ mode, host, port, address, env }) {
   const managed = manage(nextProgram, [mode, '-H', host, '-p', String(port)], {
     cwd: root,
     env: { ...env, NODE_ENV: mode === 'dev' ? 'development' : 'production', NEXT_TELEMETRY_DISABLED: '1' },
-    execArgv: ['--import', pathToFileURL(inRoot('scripts', 'lib', 'endWithParent.mjs')).href],
+    execArgv: PRELOADED.flatMap((name) => ['--import', pathToFileURL(inRoot('scripts', 'lib', name)).href]),
     stdio: ['ignore', 'pipe', 'inherit', 'ipc'],
   });
   const early = [];

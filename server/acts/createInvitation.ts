@@ -2,11 +2,13 @@ import { randomBytes } from 'node:crypto';
 import type { z } from 'zod';
 import { lockWorkshop, memberByEmail, openInvitations, workshopName } from '@/db/queries/members';
 import { invitation } from '@/db/schema';
+import type { Tx } from '@/db/types';
 import type { InvitationRow } from '@/lib/contract/answers';
 import type { CreateInvitation } from '@/lib/contract/bodies';
 import { texts as mails } from '@/lib/text/en/mail';
 import { texts } from '@/lib/text/en/server';
 import { fill } from '@/lib/text/fill';
+import { countTry, INVITING } from '../auth/throttle';
 import { type ActContext, transact } from '../context';
 import { sha256 } from '../ids';
 import { queueMail } from '../mail/queue';
@@ -35,6 +37,7 @@ export function createInvitation(
     const open = await openInvitations(tx, workshopId, context.now);
     if (open.some((other) => other.email === email)) throw new AppError('conflict', texts.details.alreadyInvited);
 
+    await assertNotTooMany(tx, context, email);
     const token = randomBytes(32).toString('base64url');
     const expiresAt = new Date(context.now.getTime() + INVITATION_DAYS * DAY_MS);
     const id = context.newId();
@@ -69,4 +72,12 @@ export function createInvitation(
       expiresAt: expiresAt.toISOString(),
     };
   });
+}
+
+/** The mail goes to whatever address was typed, so it counts against who sends and against who would get it. */
+async function assertNotTooMany(tx: Tx, { who, now }: ActContext, email: string): Promise<void> {
+  const wait = await countTry(tx, { path: INVITING, email, address: who.userId }, now);
+  if (wait === null) return;
+  const message = fill(texts.details.tooManyInvitations, { minutes: Math.ceil(wait / 60) });
+  throw new AppError('too-many', message, { retryAfterSeconds: wait });
 }

@@ -10,6 +10,7 @@ import type { Member } from '../permissions';
 import { notFound } from '../problems';
 import { audit } from './audit';
 import { assertAnOwnerRemains } from './lastOwner';
+import { withdrawInvitationsOf } from './withdrawInvitations';
 
 /** Gives a member this set of roles. The workshop's last owner stays one. */
 export function setRoles(
@@ -22,7 +23,10 @@ export function setRoles(
     await lockWorkshop(tx, member.workshopId);
     const target = isId(memberId) ? await memberById(tx, member.workshopId, memberId) : undefined;
     if (target === undefined) throw notFound();
-    if (!input.roles.includes('owner')) await assertAnOwnerRemains(tx, member.workshopId, target.id);
+    if (!input.roles.includes('owner')) {
+      await assertAnOwnerRemains(tx, member.workshopId, target.id);
+      await withdrawInvitationsOf(tx, context, member.workshopId, target.userId);
+    }
     await tx.update(membership).set({ roles: input.roles }).where(eq(membership.id, target.id));
     await audit(tx, context, {
       act: 'member.setRoles',

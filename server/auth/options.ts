@@ -10,6 +10,13 @@ export const SESSION_IDLE_SECONDS = 7 * DAY;
 /** … and this long after it began, however much it is used (ASVS 5.0.0, 7.3.2). */
 export const SESSION_ABSOLUTE_SECONDS = 30 * DAY;
 
+/** Paths of the library that no page of ours uses; closed, for what is not used is not watched. */
+const UNUSED: string[] = [
+  ...['/error', '/ok', '/sign-in/social', '/link-social', '/unlink-account', '/list-accounts', '/account-info'],
+  ...['/get-access-token', '/refresh-token', '/update-session', '/verify-password', '/change-email'],
+  ...['/delete-user', '/delete-user/callback'],
+];
+
 /** What needs no database and no secret; the tables that it asks for are checked against db/schema/auth.ts. */
 export const authOptions = {
   appName: 'Foldspar',
@@ -28,6 +35,7 @@ export const authOptions = {
       console.error(JSON.stringify({ level: 'error', where: 'identity', message }));
     },
   },
+  disabledPaths: UNUSED,
   emailAndPassword: {
     enabled: true,
     requireEmailVerification: true,

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { passwordFault } from './password';
+import { PASSWORD_MAX, passwordFault } from './password';
 
 describe('passwordFault', () => {
   it.each([
@@ -13,6 +13,13 @@ describe('passwordFault', () => {
     '  Password!!',
   ])('calls "%s" one of the first guesses', (password) => {
     expect(passwordFault(password, {})).toBe('common');
+  });
+
+  it('does not look at one that is too long anyway, however it is made', () => {
+    const long = `${'1'.repeat(PASSWORD_MAX)}a1`;
+    expect(passwordFault(long, {})).toBeNull();
+    expect(passwordFault('1'.repeat(PASSWORD_MAX), {})).toBe('common');
+    expect(passwordFault('1'.repeat(PASSWORD_MAX + 1), {})).toBeNull();
   });
 
   it.each(['seven-geese-over-the-tarn', 'k7#mmq2Lw9', 'correct horse', 'ножницы-и-клей', '4 balsa sticks, 9 pins'])(

@@ -35,8 +35,12 @@ const isRepeated = (text: string): boolean => /^(.{1,5})\1+$/u.test(text);
 
 export type PasswordFault = 'common' | 'holds-name';
 
-/** What makes a password one of the first guesses, or null. Length is checked elsewhere; there are no rules of composition. */
+/**
+ * What makes a password one of the first guesses, or null. There are no rules of composition. Length is checked elsewhere, and one
+ * that is too long is not looked at: the time that the patterns take grows with its square.
+ */
 export function passwordFault(password: string, person: { name?: string; email?: string }): PasswordFault | null {
+  if (password.length > PASSWORD_MAX) return null;
   const lower = password.toLowerCase();
   if (isRun(lower) || isRepeated(lower) || COMMON_STEMS.has(bare(lower)) || !/\D/.test(lower.slice(0, -1)))
     return 'common';

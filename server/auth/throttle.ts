@@ -17,12 +17,17 @@ export interface Limits {
 const MINUTE = 60;
 const HOUR = 60 * MINUTE;
 
+/** Counted as a path is; here the "address" is whoever invites. Anybody can found a workshop, and its name is theirs to choose. */
+export const INVITING = 'invitation';
+
 /** Per path of the identity service. Whatever sends a mail is limited by whom it would be sent to. */
 export const LIMITS: ReadonlyMap<string, Limits> = new Map([
   ['/sign-in/email', { byAccount: { max: 10, seconds: 15 * MINUTE }, byAddress: { max: 100, seconds: 5 * MINUTE } }],
   ['/sign-up/email', { byAccount: { max: 5, seconds: HOUR }, byAddress: { max: 50, seconds: HOUR } }],
   ['/request-password-reset', { byAccount: { max: 5, seconds: HOUR }, byAddress: { max: 30, seconds: HOUR } }],
   ['/send-verification-email', { byAccount: { max: 5, seconds: HOUR }, byAddress: { max: 30, seconds: HOUR } }],
+  [INVITING, { byAccount: { max: 5, seconds: 24 * HOUR }, byAddress: { max: 60, seconds: HOUR } }],
+  ['/change-password', { byAddress: { max: 20, seconds: 15 * MINUTE } }],
   ['/reset-password', { byAddress: { max: 20, seconds: 15 * MINUTE } }],
 ]);
 

@@ -29,3 +29,53 @@ describe('queued', () => {
     expect(await queued(async () => 'still here')).toBe('still here');
   });
 });
+
+/** A job that runs until it is told to end. */
+function held(by?: string, signal?: AbortSignal) {
+  let end = (): void => undefined;
+  let started = false;
+  const done = queued(
+    () => {
+      started = true;
+      return new Promise<string>((resolve) => {
+        end = () => resolve('done');
+      });
+    },
+    { by, signal },
+  );
+  return { done, end: () => end(), started: () => started };
+}
+
+describe('a place in the queue', () => {
+  it('is one of six that a person may have, and others still come in', async () => {
+    const six = Array.from({ length: 6 }, () => held('ada'));
+    await expect(queued(async () => 'seventh', { by: 'ada' })).rejects.toMatchObject({ kind: 'busy' });
+    const other = held('bea');
+    for (const job of six) {
+      job.end();
+      await job.done;
+    }
+    expect(other.started()).toBe(true);
+    other.end();
+    expect(await other.done).toBe('done');
+    expect(await queued(async () => 'again', { by: 'ada' })).toBe('again');
+  });
+
+  it('is given up at once by whoever goes away while waiting', async () => {
+    const [first, second] = [held(), held()];
+    const people = Array.from({ length: 30 }, () => new AbortController());
+    const waiting = people.map(({ signal }) => held(undefined, signal));
+    await expect(queued(async () => 'late')).rejects.toMatchObject({ kind: 'busy' });
+    for (const person of people) person.abort();
+    const ends = await Promise.allSettled(waiting.map((job) => job.done));
+    expect(ends.map(({ status }) => status)).toEqual(Array(30).fill('rejected'));
+    expect(waiting.some((job) => job.started())).toBe(false);
+    const late = held();
+    first.end();
+    await first.done;
+    expect(late.started()).toBe(true);
+    second.end();
+    late.end();
+    expect(await Promise.all([second.done, late.done])).toEqual(['done', 'done']);
+  });
+});

@@ -3,8 +3,10 @@ import { fill } from '@/lib/text/fill';
 import { getAuth } from '../auth';
 import { isSameOrigin, originOf } from '../origin';
 import { AppError, type ProblemKind } from '../problems';
+import { whoOf } from '../session';
 import { PRIVATE } from './answers';
-import { asAppError, problemResponse } from './refuse';
+import { BODY_MAX_KB, readOptionalJson } from './readJson';
+import { asAppError, logRefusal, problemResponse } from './refuse';
 
 const kindOf = (status: number): ProblemKind => {
   switch (status) {
@@ -31,12 +33,26 @@ export async function handleAuth(request: Request): Promise<Response> {
     }
     if (request.method !== 'GET' && !isSameOrigin(request.headers))
       throw new AppError('cross-origin', texts.details.crossOrigin);
+    // Ends a session that is past its age before the identity service sees it.
+    if (request.headers.has('cookie')) await whoOf(request.headers);
     const auth = await getAuth();
-    const response = await auth.handler(request);
+    const response = await auth.handler(await bounded(request));
     return response.status < 400 ? kept(response) : await refusal(response, pathname);
   } catch (error) {
     return problemResponse(asAppError(error, `${request.method} ${pathname}`), pathname);
   }
+}
+
+/** A NUL as JSON spells it: an odd number of backslashes before the "u". The database takes none. */
+const NUL = /(?<!\\)(?:\\\\)*\\u0000/;
+
+/** The same request with its body read: the library would take any length and any bytes. */
+async function bounded(request: Request): Promise<Request> {
+  if (request.method === 'GET') return request;
+  const body = await readOptionalJson(request, BODY_MAX_KB);
+  if (body !== null && NUL.test(body.text)) throw new AppError('invalid', texts.details.noNul);
+  const { url, method, headers } = request;
+  return new Request(url, { method, headers, body: body === null ? null : body.text });
 }
 
 function kept(response: Response): Response {
@@ -50,7 +66,7 @@ async function refusal(response: Response, instance: string): Promise<Response> 
   const given = typeof body === 'object' && body !== null ? Object.fromEntries(Object.entries(body)) : {};
   const kind = kindOf(response.status);
   // Who tried is not written down: an address typed into the wrong field may be a password.
-  console.warn(JSON.stringify({ level: 'warn', where: instance, status: response.status, code: given.code }));
+  logRefusal(instance, { status: response.status, code: given.code });
   const message = typeof given.message === 'string' && response.status < 500 ? given.message : texts.titles[kind];
   const headers = new Headers({ ...PRIVATE, 'content-type': 'application/problem+json; charset=utf-8' });
   for (const cookie of response.headers.getSetCookie()) headers.append('set-cookie', cookie);

@@ -4,7 +4,7 @@ import type { ActContext, Who } from '../context';
 import { jsonResponse } from './answers';
 import { AlreadyDone, earlierAnswer, idempotencyKeyOf, type OnceRequest, onceFor } from './once';
 import { parseBody } from './parseBody';
-import { readJson } from './readJson';
+import { BODY_MAX_KB, readJson } from './readJson';
 
 /** One request by somebody who is signed in. */
 export class Call<Params> {
@@ -24,9 +24,9 @@ export class Call<Params> {
     this.who = context.who;
   }
 
-  /** The JSON body in the shape that the act takes. */
-  async read<T>(shape: z.ZodType<T>): Promise<T> {
-    const { text, value } = await readJson(this.request);
+  /** The JSON body in the shape that the act takes. A document may be larger than anything else. */
+  async read<T>(shape: z.ZodType<T>, maxKb: number = BODY_MAX_KB): Promise<T> {
+    const { text, value } = await readJson(this.request, maxKb);
     this.bodyText = text;
     return parseBody(shape, value);
   }

@@ -9,7 +9,7 @@ import { type MemberRoute, type ParamsOf, routeOf, type SignedInRoute } from '..
 import { whoOf } from '../session';
 import { jsonResponse, type Reply } from './answers';
 import { Call } from './call';
-import { asAppError, problemResponse } from './refuse';
+import { asAppError, logRefusal, problemResponse } from './refuse';
 
 type Handler<Params> = (request: Request, context: { params: Promise<Params> }) => Promise<Response>;
 type WorkshopParams<Key extends MemberRoute> = ParamsOf<Key> & { readonly workshop: string };
@@ -32,7 +32,8 @@ export function inWorkshop<Key extends MemberRoute>(
       const params = await context.params;
       const base = await openCall(request, params);
       const member = await claim(base.db, base.who, params.workshop, needs);
-      return work(Object.assign(base, { member }));
+      const proof: ActContext['proof'] = (tx) => claim(tx, base.who, params.workshop, needs);
+      return work(Object.assign(base, { member, context: { ...base.context, proof } }));
     });
 }
 
@@ -51,7 +52,10 @@ async function guarded(request: Request, work: () => Promise<Reply | Response>):
     const reply = await work();
     return reply instanceof Response ? reply : jsonResponse(request, reply);
   } catch (error) {
-    return problemResponse(asAppError(error, `${request.method} ${pathname}`), pathname);
+    const refusal = asAppError(error, `${request.method} ${pathname}`);
+    if (refusal.kind === 'forbidden' || refusal.kind === 'cross-origin')
+      logRefusal(`${request.method} ${pathname}`, { kind: refusal.kind });
+    return problemResponse(refusal, pathname);
   }
 }
 
@@ -65,7 +69,7 @@ async function openCall<Params>(request: Request, params: Params): Promise<Call<
     who,
     now,
     newId,
-    engine: runEngine,
+    engine: (job, signal) => runEngine(job, signal, who.userId),
     // Links in mails: a Host header that is not ours leads nowhere but here.
     baseUrl: originOf(request.headers) ?? '',
     signal: request.signal,

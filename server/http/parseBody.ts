@@ -4,6 +4,9 @@ import { texts } from '@/lib/text/en/server';
 import { fill } from '@/lib/text/fill';
 import { AppError } from '../problems';
 
+/** More than this at once is a wall, not a list. */
+const MAX_ERRORS = 50;
+
 type FieldErrors = NonNullable<ProblemDetails['errors']>;
 type Issue = z.core.$ZodIssue;
 
@@ -32,7 +35,7 @@ function fieldErrors(issues: readonly Issue[], at: readonly PropertyKey[] = []):
 export function parseBody<T>(schema: z.ZodType<T>, value: unknown): T {
   const parsed = schema.safeParse(value);
   if (parsed.success) return parsed.data;
-  const errors = fieldErrors(parsed.error.issues);
+  const errors = fieldErrors(parsed.error.issues).slice(0, MAX_ERRORS);
   const [first] = errors;
   const detail = first === undefined ? texts.titles.invalid : [first.path, first.message].filter(Boolean).join(': ');
   throw new AppError('invalid', detail, { errors });

@@ -3,15 +3,16 @@ import { fill } from '@/lib/text/fill';
 import { AppError } from '../problems';
 import { scanJson } from './scanJson';
 
+const KB = 1024;
 /** The largest airframe that the parser takes is well under this. */
-export const BODY_MAX_MB = 2;
-const BODY_MAX_BYTES = BODY_MAX_MB * 1024 * 1024;
-
-const tooLarge = (): AppError => new AppError('too-large', fill(texts.details.tooLarge, { max: BODY_MAX_MB }));
+export const DOCUMENT_MAX_KB = 2048;
+/** Anything else: two long paragraphs fit many times over. */
+export const BODY_MAX_KB = 64;
 
 /** Reads no further than the cap, whatever Content-Length says. */
-async function readCapped(request: Request): Promise<Uint8Array> {
-  if (Number(request.headers.get('content-length') ?? 0) > BODY_MAX_BYTES) throw tooLarge();
+export async function readCapped(request: Request, maxKb: number): Promise<Uint8Array> {
+  const tooLarge = new AppError('too-large', fill(texts.details.tooLarge, { max: maxKb }));
+  if (Number(request.headers.get('content-length') ?? 0) > maxKb * KB) throw tooLarge;
   const chunks: Uint8Array[] = [];
   let total = 0;
   const reader = request.body?.getReader();
@@ -19,20 +20,35 @@ async function readCapped(request: Request): Promise<Uint8Array> {
     const { done, value } = await reader.read();
     if (done) break;
     total += value.byteLength;
-    if (total > BODY_MAX_BYTES) {
+    if (total > maxKb * KB) {
       await reader.cancel();
-      throw tooLarge();
+      throw tooLarge;
     }
     chunks.push(value);
   }
   return Buffer.concat(chunks);
 }
 
-/** The body as JSON, with its text. Refuses what is too large, too deep, not JSON, not UTF-8, or says one thing twice. */
-export async function readJson(request: Request): Promise<{ text: string; value: unknown }> {
-  const type = request.headers.get('content-type') ?? '';
+function assertJsonType({ headers }: Request): void {
+  const type = headers.get('content-type') ?? '';
   if (!/^application\/json\s*(;|$)/i.test(type)) throw new AppError('wrong-media-type', texts.details.wrongMediaType);
-  const bytes = await readCapped(request);
+}
+
+/** The body as JSON, with its text. Refuses what is too large, too deep, not JSON, not UTF-8, or says one thing twice. */
+export async function readJson(request: Request, maxKb: number): Promise<{ text: string; value: unknown }> {
+  assertJsonType(request);
+  return parseJson(await readCapped(request, maxKb));
+}
+
+/** As `readJson`, and an absent body is null. */
+export async function readOptionalJson(request: Request, maxKb: number): Promise<{ text: string } | null> {
+  const bytes = await readCapped(request, maxKb);
+  if (bytes.length === 0) return null;
+  assertJsonType(request);
+  return parseJson(bytes);
+}
+
+function parseJson(bytes: Uint8Array): { text: string; value: unknown } {
   let text: string;
   let value: unknown;
   try {

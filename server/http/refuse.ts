@@ -41,6 +41,11 @@ export function asAppError(error: unknown, where: string): AppError {
   return new AppError('fault', fill(texts.details.fault, { reference }));
 }
 
+/** Refusals that somebody who watches the log wants to see (ASVS 5.0.0, 16.3.2). Nothing that was typed is in it. */
+export function logRefusal(where: string, facts: Readonly<Record<string, unknown>>): void {
+  console.warn(JSON.stringify({ level: 'warn', where, ...facts }));
+}
+
 /** RFC 9457 answer. */
 export function problemResponse(error: AppError, path: string): Response {
   const problem = problemDetails(error, path);

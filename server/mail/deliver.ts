@@ -39,6 +39,14 @@ export async function deliverMail(db: Db, now: Date, transport: Transport | null
   return sent;
 }
 
+/** As `deliverMail`, and lets the caller go on: how long a mail takes would tell a stranger that one was sent. */
+export function deliverSoon(db: Db, now: Date): void {
+  deliverMail(db, now).catch((error: unknown) => {
+    const message = error instanceof Error ? error.message : String(error);
+    console.error(JSON.stringify({ level: 'error', where: 'mail', message }));
+  });
+}
+
 async function deliverOne(db: Db, now: Date, transport: Transport): Promise<'none' | 'sent' | 'failed'> {
   // Claimed by noting the attempt first: if this process dies while it sends, the mail is tried again and never forgotten.
   const rested = or(isNull(mailOutbox.triedAt), lt(mailOutbox.triedAt, new Date(now.getTime() - RETRY_AFTER_MS)));

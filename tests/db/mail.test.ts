@@ -60,6 +60,18 @@ describe('reading the outbox on a page', () => {
     expect(from({})).toBe(false);
   });
 
+  it('is closed behind a proxy, even one that makes every visitor look local', () => {
+    vi.stubEnv('HOST', '127.0.0.1');
+    const local = { host: '127.0.0.1:3000', 'x-forwarded-for': '127.0.0.1' };
+    expect(from({ ...local, via: '1.1 front' })).toBe(false);
+    expect(from({ ...local, forwarded: 'for=203.0.113.5' })).toBe(false);
+    expect(from({ ...local, 'x-real-ip': '203.0.113.5' })).toBe(false);
+    vi.stubEnv('FOLDSPAR_URL', 'https://plans.example');
+    expect(from(local)).toBe(false);
+    vi.stubEnv('FOLDSPAR_URL', 'http://localhost:3000');
+    expect(from(local)).toBe(true);
+  });
+
   it('is closed when others can reach the server, whatever they send, and once mail goes out', () => {
     vi.stubEnv('HOST', '0.0.0.0');
     expect(from({ host: 'localhost:3000', 'x-forwarded-for': '127.0.0.1' })).toBe(false);

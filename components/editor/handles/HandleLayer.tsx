@@ -2,11 +2,11 @@
 
 import { useMemo, useRef } from 'react';
 import type { Handle } from '@/lib/airframe/handles';
+import { elementName } from '@/lib/airframe/names';
 import type { Vec2 } from '@/lib/numerics/vec';
 import { sheet as texts } from '@/lib/text/en/board';
 import { fill } from '@/lib/text/fill';
 import { mmFromScreen, screenFromMm } from '../sheet/fold';
-import { elementName } from '../sheet/names';
 import { useBoard, useBoardState, usePainter } from '../useBoard';
 import { gripTurnDeg, paintSlider } from './paintSlider';
 import { spread } from './spread';

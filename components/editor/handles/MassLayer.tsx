@@ -45,9 +45,11 @@ export function MassLayer() {
     for (const mass of hungOn(sheet, masses)) {
       const button = buttons.current.get(mass.elementId);
       const handle = placeHandle(handles, mass.elementId);
-      if (button !== undefined && handle !== undefined) {
-        paintSlider(button, handle, hangingAt(sheet, mass), board.store.getState().system);
-      }
+      if (button === undefined || handle === undefined) continue;
+      paintSlider(button, handle, hangingAt(sheet, mass), board.store.getState().system);
+      // One on top of another could only be taken by chance; the slip has its number, and a closer look makes room.
+      const visibility = mass.crowded ? 'hidden' : 'visible';
+      if (button.style.visibility !== visibility) button.style.visibility = visibility;
     }
   });
 

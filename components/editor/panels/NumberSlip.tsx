@@ -2,9 +2,9 @@
 
 import { useMemo } from 'react';
 import { ScoreLine } from '@/components/ui/ScoreLine';
+import { elementName } from '@/lib/airframe/names';
 import { slip as texts } from '@/lib/text/en/board';
 import { fill } from '@/lib/text/fill';
-import { elementName } from '../sheet/names';
 import { useBoard, useBoardState } from '../useBoard';
 import { NumberField } from './NumberField';
 

@@ -1,9 +1,9 @@
 'use client';
 
 import { useMemo } from 'react';
+import { type NamedElement, namedElements } from '@/lib/airframe/names';
 import { planOutlines, sideOutlines, type ViewOutline } from '@/lib/airframe/outlines';
 import { strip as texts } from '@/lib/text/en/board';
-import { type BoardElement, boardElements } from '../sheet/names';
 import { useBoard, useBoardState } from '../useBoard';
 import { PartPicture } from './PartPicture';
 
@@ -13,7 +13,7 @@ const BUTTON =
 
 /** The element's own lines, starboard alone; what stands upright is drawn from the side. */
 function linesOf(
-  { id, kind }: BoardElement,
+  { id, kind }: NamedElement,
   plan: readonly ViewOutline[],
   side: readonly ViewOutline[],
 ): readonly ViewOutline[] {
@@ -35,7 +35,7 @@ export function PartsStrip() {
   const parts = useMemo(() => {
     const plan = planOutlines(airframe);
     const side = sideOutlines(airframe);
-    return boardElements(airframe).map((element) => ({ element, lines: linesOf(element, plan, side) }));
+    return namedElements(airframe).map((element) => ({ element, lines: linesOf(element, plan, side) }));
   }, [airframe]);
   return (
     <nav aria-label={texts.title} className="min-w-0 overflow-x-auto border-b border-rule bg-paper">

@@ -47,7 +47,7 @@ export interface SheetRoom {
 }
 
 /** Space in px: around the drawing, between views, height of the balance rule. */
-export const SHEET_SPACING = { edge: 26, gap: 30, rule: 126 } as const;
+export const SHEET_SPACING = { edge: 26, gap: 30, rule: 136 } as const;
 /** Below this room, px, a second view would make both too small to work in. */
 export const SHEET_LEAST = { frontWidth: 820, sideHeight: 400 } as const;
 

@@ -14,6 +14,18 @@ describe('hang', () => {
       ['servo', 2],
       ['motor', 0],
     ]);
+    expect(hung.some(({ crowded }) => crowded)).toBe(false);
+  });
+
+  it('says of a mass for which no row has room that it is crowded', () => {
+    const hung = hang([mass('a', 0), mass('b', 4), mass('c', 9), mass('d', 15), mass('e', 31)], 30);
+    expect(hung.map(({ elementId, row, crowded }) => [elementId, row, crowded])).toEqual([
+      ['a', 0, false],
+      ['b', 1, false],
+      ['c', 2, false],
+      ['d', 0, true],
+      ['e', 1, true],
+    ]);
   });
 
   it('loses no mass and leaves the stations alone', () => {

@@ -13,6 +13,8 @@ const ROWS: readonly Row[] = [0, 1, 2];
 
 export interface HungMass extends HangingMass {
   readonly row: Row;
+  /** True where even the roomiest row is too full: it covers its neighbour and cannot be taken by itself. */
+  readonly crowded: boolean;
 }
 
 /**
@@ -29,9 +31,10 @@ export function hang(masses: readonly HangingMass[], leastMm: number): readonly 
     .sort((a, b) => a.xMm - b.xMm)
     .map((mass) => {
       const roomiest = ROWS.reduce((best, row) => (last[row] < last[best] ? row : best));
-      const row = ROWS.find((each) => mass.xMm - last[each] >= leastMm) ?? roomiest;
+      const free = ROWS.find((each) => mass.xMm - last[each] >= leastMm);
+      const row = free ?? roomiest;
       last[row] = mass.xMm;
-      return { ...mass, row };
+      return { ...mass, row, crowded: free === undefined };
     });
 }
 

@@ -7,8 +7,8 @@ import { type HangingMass, type HungMass, hang, massSquarePx } from './masses';
 import type { Picture } from './paintSheet';
 import { cgSign, lineBetween, npSign, type Pen, words } from './pen';
 
-/** Heights on the balance rule from its top edge, px. Its sliders read the same ones. */
-export const RULE_ROWS = { ticks: 0, numbers: 17, bar: 46, hang: [73, 93, 113] } as const;
+/** Heights on the balance rule from its top edge, px. Its sliders, 24 px high, read the same ones: rows of masses keep clear of each other. */
+export const RULE_ROWS = { ticks: 0, numbers: 17, bar: 46, hang: [71, 96, 121] } as const;
 
 const TICK_GAP_PX = 64;
 const STEPS = [1, 2, 5, 10, 20, 50, 100, 200, 500, 1000] as const;

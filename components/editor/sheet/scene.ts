@@ -1,4 +1,5 @@
 import { type Handle, handles } from '@/lib/airframe/handles';
+import { namedElements } from '@/lib/airframe/names';
 import { frontOutlines, planOutlines, sideOutlines, type ViewOutline } from '@/lib/airframe/outlines';
 import { resolve } from '@/lib/airframe/resolve';
 import type { ResolvedAirframe } from '@/lib/airframe/resolved';
@@ -8,7 +9,6 @@ import type { Vec2 } from '@/lib/numerics/vec';
 import type { Places } from './cg';
 import type { Extents, Range } from './fold';
 import type { HangingMass } from './masses';
-import { boardElements } from './names';
 
 // What the sheet shows of one airframe, worked out on the page itself so that it follows the hand in the same frame.
 
@@ -45,7 +45,7 @@ export function wingMac({ surfaces }: ResolvedAirframe): MacMark | null {
 }
 
 function hangingMasses(airframe: Airframe, resolved: ResolvedAirframe): readonly HangingMass[] {
-  const names = new Map(boardElements(airframe).map(({ id, name }) => [id, name]));
+  const names = new Map(namedElements(airframe).map(({ id, name }) => [id, name]));
   const station = (elementId: string) => resolved.places.get(elementId)?.at[0] ?? 0;
   const items = airframe.items.map((item) => ({
     elementId: item.id,

@@ -2,13 +2,14 @@ import { radFromDeg } from '@/lib/numerics/vec';
 import { texts } from '@/lib/text/en/airframe';
 import { fill } from '@/lib/text/fill';
 import { trimmedDigits } from '@/lib/units/number';
+import { controlWithin, elementWithin } from '../names';
 import type { ResolvedControl, ResolvedSurface } from '../resolved';
 import { MIN_CONTROL_MM } from '../rules/limits';
 import { thicknessOf } from '../rules/surface';
 import type { Airframe } from '../schema/airframe';
 import type { Control } from '../schema/surface';
 import { panelAt } from '../section';
-import { AFT, FORE, type Grip, inPlan, nameOf, UPRIGHT_COS, withSurface } from './grip';
+import { AFT, FORE, type Grip, inPlan, UPRIGHT_COS, withSurface } from './grip';
 
 /** Least and largest share of the chord that the document holds for a control. */
 const CHORD_SHARE: readonly [number, number] = [0.02, 1];
@@ -24,6 +25,11 @@ const setControl = ({ airframe, surface, placed }: Context, change: (control: Co
     ...one,
     controls: one.controls.map((control) => (control.id === placed.control.id ? change(control) : control)),
   }));
+
+const labelWords = ({ airframe, surface, placed }: Context) => ({
+  control: controlWithin(surface.surface, placed.control),
+  element: elementWithin(airframe, surface.surface.id),
+});
 
 /** How the ends run in plan: outward, or along x where the surface stands too steep to be dragged sideways. */
 function endDirection(surface: ResolvedSurface, station: number) {
@@ -46,9 +52,13 @@ function endGrip(context: Context, end: 'from' | 'to'): Grip {
   const value = control[end];
   const low = end === 'from' ? (inside?.to ?? 0) : control.from + least;
   const high = end === 'from' ? control.to - least : (outside?.from ?? 1);
-  const rootWords = inside ? fill(texts.stops.controlInside, { other: inside.id }) : texts.stops.surfaceRoot;
-  const tipWords = outside ? fill(texts.stops.controlOutside, { other: outside.id }) : texts.stops.surfaceTip;
-  const words = { control: control.id, element: nameOf(surface.surface) };
+  const rootWords = inside
+    ? fill(texts.stops.controlInside, { other: controlWithin(surface.surface, inside) })
+    : texts.stops.surfaceRoot;
+  const tipWords = outside
+    ? fill(texts.stops.controlOutside, { other: controlWithin(surface.surface, outside) })
+    : texts.stops.surfaceTip;
+  const words = labelWords(context);
   return {
     handle: {
       id: `${surface.surface.id}/${control.id}/${end}`,
@@ -82,9 +92,10 @@ function chordGrip(context: Context, end: 'inner' | 'outer'): Grip {
     handle: {
       id: `${surface.surface.id}/${control.id}/${end === 'inner' ? 'chordInner' : 'chordOuter'}`,
       elementId: surface.surface.id,
-      label: fill(end === 'inner' ? texts.handles.controlChordInner : texts.handles.controlChordOuter, {
-        control: control.id,
-      }),
+      label: fill(
+        end === 'inner' ? texts.handles.controlChordInner : texts.handles.controlChordOuter,
+        labelWords(context),
+      ),
       unit: 'share',
       value,
       min,

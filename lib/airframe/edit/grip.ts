@@ -38,9 +38,6 @@ export const UPRIGHT_COS = 0.2;
 
 export const inPlan = ([x, y]: Vec3): Vec2 => [x, y];
 
-export const nameOf = (element: { readonly id: string; readonly name?: string | undefined }): string =>
-  element.name ?? element.id;
-
 /** The document with one surface changed; every other part is shared with the old one. */
 export function withSurface(airframe: Airframe, id: string, change: (surface: Surface) => Surface): Airframe {
   return { ...airframe, surfaces: airframe.surfaces.map((surface) => (surface.id === id ? change(surface) : surface)) };

@@ -2,12 +2,13 @@ import { degFromRad, lerp3, radFromDeg } from '@/lib/numerics/vec';
 import { texts } from '@/lib/text/en/airframe';
 import { fill } from '@/lib/text/fill';
 import { trimmedDigits } from '@/lib/units/number';
+import { elementWithin } from '../names';
 import type { ResolvedPanel, ResolvedSurface } from '../resolved';
 import { MAX_SLENDERNESS } from '../rules/limits';
 import { thicknessOf, thinnestSheet } from '../rules/surface';
 import type { Airframe } from '../schema/airframe';
 import { MAX_LENGTH_MM } from '../schema/limits';
-import { AFT, type Grip, inPlan, nameOf, OUT, UPRIGHT_COS, withPanels } from './grip';
+import { AFT, type Grip, inPlan, OUT, UPRIGHT_COS, withPanels } from './grip';
 import { withPanelLength } from './stations';
 
 /** Shortest panel that a handle makes, mm: under it there is nothing to hold while it is glued. Common practice, no source. */
@@ -34,13 +35,23 @@ interface Context {
   readonly surface: ResolvedSurface;
   readonly panel: ResolvedPanel;
   readonly base: { readonly elementId: string };
-  readonly words: { readonly element: string; readonly panel: string };
+  readonly words: { readonly element: string; readonly panel: number };
+}
+
+/** What a number of a panel is called: a surface of one panel has no panels to speak of. */
+const labelOf = ({ surface, words }: Context, alone: string, ofPanel: string): string =>
+  fill(surface.panels.length === 1 ? alone : ofPanel, words);
+
+/** A panel's length in the trade's words, when it is the whole surface: half the span, the height of what stands upright. */
+function lengthWord({ surface, panel }: Context): string {
+  if (Math.abs(Math.cos(radFromDeg(panel.rollDeg))) < UPRIGHT_COS) return texts.handles.height;
+  return surface.surface.mirrored && surface.surface.role !== 'vtail' ? texts.handles.halfSpan : texts.handles.length;
 }
 
 const idOf = ({ surface, panel }: Context, what: string): string => `${surface.surface.id}/${panel.panel.id}/${what}`;
 
 function lengthGrip(context: Context): Grip {
-  const { airframe, surface, panel, base, words } = context;
+  const { airframe, surface, panel, base } = context;
   const cos = Math.cos(radFromDeg(panel.rollDeg));
   const upright = Math.abs(cos) < UPRIGHT_COS;
   const { max, words: atMax } = longest(airframe, surface);
@@ -49,7 +60,7 @@ function lengthGrip(context: Context): Grip {
     handle: {
       ...base,
       id: idOf(context, 'length'),
-      label: fill(texts.handles.panelLength, words),
+      label: labelOf(context, lengthWord(context), texts.handles.panelLength),
       unit: 'mm',
       value,
       min: Math.min(MIN_PANEL_MM, value),
@@ -66,7 +77,7 @@ function lengthGrip(context: Context): Grip {
 }
 
 function sweepGrip(context: Context): Grip {
-  const { airframe, surface, panel, base, words } = context;
+  const { airframe, surface, panel, base } = context;
   const { sweepDeg, lengthMm } = panel.panel;
   const limit = Math.max(MAX_SWEEP_DEG, Math.abs(sweepDeg));
   const stop = fill(texts.stops.sweepLimit, { min: mm(-limit), max: mm(limit) });
@@ -74,7 +85,7 @@ function sweepGrip(context: Context): Grip {
     handle: {
       ...base,
       id: idOf(context, 'sweep'),
-      label: fill(texts.handles.sweep, words),
+      label: labelOf(context, texts.handles.sweep, texts.handles.panelSweep),
       unit: 'deg',
       value: sweepDeg,
       min: -limit,
@@ -104,7 +115,7 @@ function widest(airframe: Airframe, materialId: string, value: number): { max: n
 
 /** Chord at one end of a panel. A neighbour that met it before meets it after: the edge stays whole. */
 function chordGrip(context: Context, end: 'root' | 'tip'): Grip {
-  const { airframe, surface, panel, base, words } = context;
+  const { airframe, surface, panel, base } = context;
   const field = end === 'root' ? 'rootChordMm' : 'tipChordMm';
   const neighbour = panel.index + (end === 'root' ? -1 : 1);
   const facing = end === 'root' ? 'tipChordMm' : 'rootChordMm';
@@ -120,7 +131,10 @@ function chordGrip(context: Context, end: 'root' | 'tip'): Grip {
     handle: {
       ...base,
       id: idOf(context, end === 'root' ? 'rootChord' : 'tipChord'),
-      label: fill(end === 'root' ? texts.handles.rootChord : texts.handles.tipChord, words),
+      label:
+        end === 'root'
+          ? labelOf(context, texts.handles.rootChord, texts.handles.panelRootChord)
+          : labelOf(context, texts.handles.tipChord, texts.handles.panelTipChord),
       unit: 'mm',
       value,
       min,
@@ -144,8 +158,9 @@ function chordGrip(context: Context, end: 'root' | 'tip'): Grip {
 /** Handles of one surface's panels: length, sweep, and the chord at each end that is not already another panel's. */
 export function panelGrips(airframe: Airframe, surface: ResolvedSurface): Grip[] {
   const base = { elementId: surface.surface.id };
+  const element = elementWithin(airframe, surface.surface.id);
   return surface.panels.flatMap((panel): Grip[] => {
-    const words = { element: nameOf(surface.surface), panel: panel.panel.id };
+    const words = { element, panel: panel.index + 1 };
     const context: Context = { airframe, surface, panel, base, words };
     const before = surface.panels[panel.index - 1];
     const ownRoot = before?.panel.tipChordMm !== panel.panel.rootChordMm;
@@ -178,7 +193,7 @@ export function spanGrips(airframe: Airframe, surface: ResolvedSurface): Grip[] 
       handle: {
         id: `${surface.surface.id}/span`,
         elementId: surface.surface.id,
-        label: fill(texts.handles.span, { element: nameOf(surface.surface) }),
+        label: fill(texts.handles.span, { element: elementWithin(airframe, surface.surface.id) }),
         unit: 'mm',
         value: 2 * reach,
         min: spanAt(least),

@@ -3,6 +3,7 @@ import { texts } from '@/lib/text/en/airframe';
 import { fill } from '@/lib/text/fill';
 import { trimmedDigits } from '@/lib/units/number';
 import { boomDirection } from '../mounts';
+import { elementWithin, namedElements } from '../names';
 import { outlines, type ViewOutline } from '../outlines';
 import type { ResolvedAirframe } from '../resolved';
 import type { Airframe } from '../schema/airframe';
@@ -10,7 +11,7 @@ import type { Mount } from '../schema/common';
 import type { Item } from '../schema/equipment';
 import { MAX_LENGTH_MM } from '../schema/limits';
 import { sectionAt } from '../section';
-import { AFT, type Grip, inPlan, nameOf } from './grip';
+import { AFT, type Grip, inPlan } from './grip';
 
 /** Shortest boom that the document holds, mm. */
 const MIN_BOOM_MM = 10;
@@ -75,12 +76,12 @@ function movedMount(mount: Mount, perMm: number, dx: number): Mount {
 
 interface Movable {
   readonly id: string;
-  readonly name?: string | undefined;
   readonly mount: Mount;
 }
 
 function placeGrip(
   element: Movable,
+  name: string,
   at: Vec3,
   own: Range,
   resolved: ResolvedAirframe,
@@ -93,7 +94,7 @@ function placeGrip(
     handle: {
       id: `${element.id}/x`,
       elementId: element.id,
-      label: fill(texts.handles.placeX, { element: nameOf(element) }),
+      label: fill(texts.handles.placeX, { element: name }),
       unit: 'mm',
       value: x,
       min: Math.min(min, x),
@@ -135,6 +136,8 @@ export function placeGrips(airframe: Airframe, resolved: ResolvedAirframe, wante
     if (!place) throw new RangeError(`element ${id} has no place`);
     return place.at;
   };
+  const words = new Map(namedElements(airframe).map(({ id, within }) => [id, within]));
+  const name = (id: string): string => words.get(id) ?? id;
   let drawn: readonly ViewOutline[] | null = null;
   const free = (id: string): Range => {
     drawn ??= outlines('plan', airframe, resolved);
@@ -145,7 +148,7 @@ export function placeGrips(airframe: Airframe, resolved: ResolvedAirframe, wante
     .map((item) => {
       const place = at(item.id);
       const own = item.slide ? slideRange(item.slide, place[0]) : free(item.id);
-      return placeGrip(item, place, own, resolved, (mount, dx) => ({
+      return placeGrip(item, name(item.id), place, own, resolved, (mount, dx) => ({
         ...airframe,
         items: replaced(airframe.items, item.id, (one) => movedItem(one, mount, dx)),
       }));
@@ -153,7 +156,7 @@ export function placeGrips(airframe: Airframe, resolved: ResolvedAirframe, wante
   const drives = airframe.drives
     .filter(({ id }) => wanted(id))
     .map((drive) =>
-      placeGrip(drive, at(drive.id), free(drive.id), resolved, (mount) => ({
+      placeGrip(drive, name(drive.id), at(drive.id), free(drive.id), resolved, (mount) => ({
         ...airframe,
         drives: replaced(airframe.drives, drive.id, (one) => ({ ...one, mount })),
       })),
@@ -161,7 +164,7 @@ export function placeGrips(airframe: Airframe, resolved: ResolvedAirframe, wante
   const surfaces = airframe.surfaces
     .filter(({ id, role }) => role !== 'wing' && wanted(id))
     .map((surface) =>
-      placeGrip(surface, at(surface.id), free(surface.id), resolved, (mount) => ({
+      placeGrip(surface, name(surface.id), at(surface.id), free(surface.id), resolved, (mount) => ({
         ...airframe,
         surfaces: replaced(airframe.surfaces, surface.id, (one) => ({ ...one, mount })),
       })),
@@ -183,7 +186,7 @@ export function boomGrips(airframe: Airframe, resolved: ResolvedAirframe): Grip[
         handle: {
           id: `${boom.id}/length`,
           elementId: boom.id,
-          label: fill(texts.handles.boomLength, { element: nameOf(boom) }),
+          label: fill(texts.handles.length, { element: elementWithin(airframe, boom.id) }),
           unit: 'mm',
           value: boom.lengthMm,
           min: MIN_BOOM_MM,

@@ -113,7 +113,7 @@ export function hingeOperations(
       const marks = faces.map(
         (face): Operation =>
           control.hinge.kind === 'tape'
-            ? { ...along, id: name(`tape-${face}`), kind: 'tape', face, note: texts.notes.tapeHinge }
+            ? { ...along, id: name(`tape-${face}`), kind: 'tape', face, sharedBy: 2, note: texts.notes.tapeHinge }
             : { ...along, id: name(`pins-${face}`), kind: 'reference', face, note: texts.notes.pinnedHinge },
       );
       return { fixed: marks, moving: [...bevels, ...marks] };

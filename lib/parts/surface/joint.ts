@@ -105,6 +105,7 @@ export function seamOperations(strip: Strip, seam: Seam, thicknessMm: number, so
     path,
     closed: false,
     face,
+    sharedBy: 2,
     note: seam.bevelled ? texts.notes.dihedralJoint : texts.notes.buttJoint,
   };
   if (!seam.bevelled) return [glue];

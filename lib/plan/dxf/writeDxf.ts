@@ -45,5 +45,11 @@ export function writeDxf(drawing: Drawing): string {
       rotation: round(angleDeg),
     });
   }
+  // The key stands beside the sheet, where no cutter goes.
+  drawing.key.forEach(({ mark, text }, i) => {
+    const words = plainText(mark === null ? text : `${mark} = ${text}`);
+    const at = point3d(round(drawing.sheetMm[0] + 10), round(drawing.sheetMm[1] - 5 - 5 * i));
+    dxf.addText(at, 2.5, words, { layerName: TEXT_LAYER });
+  });
   return dxf.stringify();
 }

@@ -1,6 +1,6 @@
 import { plan } from '@/lib/text/en/plan';
 import { fill } from '@/lib/text/fill';
-import type { PlanRevision } from '../drawing';
+import { type PlanRevision, releaseDay } from '../drawing';
 import type { TileOptions } from '../tiling/format';
 import type { PageFormat } from '../tiling/grid';
 import type { TilePage } from '../tiling/tileSheets';
@@ -23,14 +23,13 @@ export interface PlanNames {
 export function stateWords(revision: PlanRevision | null): string {
   if (!revision) return words.draft;
   const states = {
-    draft: words.draft,
     released: words.released,
     goodToCut: words.goodToCut,
     held: words.held,
   } as const;
   return fill(words.revision, {
     number: revision.number,
-    date: revision.releasedAt,
+    date: releaseDay(revision),
     state: states[revision.state],
   });
 }

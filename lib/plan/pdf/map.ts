@@ -86,12 +86,13 @@ export function map(
     const left = frame.x + col * (cell[0] + GAP_MM);
     const top = frame.y + frame.h - row * (cell[1] + GAP_MM);
     const name = fill(plan.cover.mapSheet, {
-      id: sheet.drawing.id,
+      name: sheet.drawing.name,
+      material: sheet.drawing.material,
       w: trimmedDigits(w, 1),
       h: trimmedDigits(h, 1),
     });
     const style = { face: 'mono', capMm: 1.7 } as const;
-    const words = shorten(faces, `${name} · ${sheet.drawing.title}`, cell[0], style);
+    const words = shorten(faces, name, cell[0], style);
     return [
       letter(faces, words, [left, top - 2.6], style),
       sheetMap(faces, sheet, [left, top - CAPTION_MM - h * scale], scale, pageOf),

@@ -1,26 +1,26 @@
 import { Duplex, PDFDocument, PDFName, type PDFRawStream, type PDFRef, PrintScaling } from 'pdf-lib';
-import type { Figures } from '@/lib/figures/types';
 import { plan } from '@/lib/text/en/plan';
 import { fill } from '@/lib/text/fill';
+import { releaseDay } from '../drawing';
 import type { Manifest } from '../manifest';
 import type { TileOptions } from '../tiling/format';
 import type { PageFormat } from '../tiling/grid';
 import type { TiledSheet, TilePage } from '../tiling/tileSheets';
-import { type CoverInput, cover, coverPages, mapPage } from './cover';
 import { embedFonts, type PlanFonts, type Typefaces } from './fonts';
-import { type PlanNames, pageFoot, pageJoins } from './furniture';
+import type { FrontPage } from './front';
+import { type PlanNames, pageFoot, pageJoins, stateWords } from './furniture';
 import { clip, grey, group, PT_PER_MM, shift, toMillimetres } from './ink';
 import { matchMark } from './matchMark';
 import { cutSegments, sheetContent } from './sheetContent';
 
 export interface PdfInput {
   readonly sheets: readonly TiledSheet[];
-  /** Format of the pages that are not tiles. */
+  /** The pages before the first tile. */
+  readonly front: readonly FrontPage[];
+  /** Their format. */
   readonly coverFormat: PageFormat;
   readonly options: TileOptions;
   readonly names: PlanNames;
-  readonly figures: Figures | null;
-  readonly notDrawn: readonly string[];
   readonly fonts: PlanFonts;
   /** The copy that is attached inside the file: without the file's own hash. */
   readonly manifest: Manifest;
@@ -59,7 +59,7 @@ function addForm(writer: Writer, sheet: TiledSheet): PDFRef {
 }
 
 export const tileName = (sheet: TiledSheet, { cell }: TilePage): string =>
-  fill(plan.page.tile, { sheet: sheet.drawing.id, row: cell.row + 1, column: cell.col + 1 });
+  fill(plan.page.tile, { sheet: sheet.drawing.name, row: cell.row + 1, column: cell.col + 1 });
 
 function addTile(
   writer: Writer,
@@ -85,16 +85,12 @@ function addTile(
 function setDocument(doc: PDFDocument, { names }: PdfInput): void {
   const { design, revision } = names;
   doc.setTitle(fill(plan.page.plan, { design }));
-  doc.setSubject(
-    revision
-      ? fill(plan.page.revision, { number: revision.number, date: revision.releasedAt, state: revision.state })
-      : plan.page.draftLong,
-  );
+  doc.setSubject(revision ? stateWords(revision) : plan.page.draftLong);
   doc.setProducer('Foldspar');
   doc.setCreator('Foldspar');
   if (revision) {
     // The only date the file holds is the revision's own, so that the same revision gives the same bytes on any day.
-    const date = new Date(`${revision.releasedAt}T00:00:00Z`);
+    const date = new Date(`${releaseDay(revision)}T00:00:00Z`);
     doc.setCreationDate(date);
     doc.setModificationDate(date);
   }
@@ -110,17 +106,12 @@ export async function writePdf(input: PdfInput): Promise<Uint8Array> {
   const doc = await PDFDocument.create({ updateMetadata: false });
   setDocument(doc, input);
   const writer: Writer = { doc, faces: await embedFonts(doc, input.fonts) };
-  const before = coverPages(input.sheets.length);
-  const coverInput: CoverInput = { ...input, pageOf: (index) => before + 1 + index };
-  for (let page = 0; page < before; page++) {
-    const content =
-      page === 0
-        ? cover(writer.faces, input.coverFormat, coverInput)
-        : mapPage(writer.faces, input.coverFormat, coverInput, page);
-    const name = page === 0 ? plan.page.cover : plan.page.map;
-    const foot = pageFoot(writer.faces, input.coverFormat, name, page + 1, input.names);
+  const before = input.front.length;
+  input.front.forEach(({ name, ink }, i) => {
+    const content = ink(writer.faces, { names: input.names, pageOf: (index) => before + 1 + index });
+    const foot = pageFoot(writer.faces, input.coverFormat, name, i + 1, input.names);
     addPage(writer, input.coverFormat, [content, foot].join('\n'), {});
-  }
+  });
   for (const sheet of input.sheets) {
     if (sheet.pages.length === 0) continue;
     const form = addForm(writer, sheet);

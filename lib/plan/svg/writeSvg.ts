@@ -49,7 +49,9 @@ export function writeSvg(drawing: Drawing, page: SvgPage): string {
     const svg = new Svg(page.root);
     const [w, h] = drawing.sheetMm;
     svg.attr({ width: `${fixed(w)}mm`, height: `${fixed(h)}mm`, viewBox: `0 0 ${fixed(w)} ${fixed(h)}` });
-    svg.element('title').words(plainText(drawing.title));
+    svg.element('title').words(plainText(`${drawing.name} · ${drawing.material}`));
+    const key = drawing.key.map(({ mark, text }) => (mark === null ? text : `${mark} = ${text}`));
+    if (key.length > 0) svg.element('desc').words(plainText(key.join('; ')));
     for (const kind of LINE_TYPE_KINDS) {
       const lines = drawing.lines.filter(({ type }) => type === kind);
       if (lines.length === 0) continue;

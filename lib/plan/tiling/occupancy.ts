@@ -22,12 +22,12 @@ export const baseline = ({ at, text, heightMm, angleDeg, align }: DrawnText): Pi
   return { points: [end(-before), end(length - before)], closed: false };
 };
 
-/** The sheet's own edge is drawn where a page shows it and is no reason for a page. */
+/** The sheet's own edge is drawn where a page shows it and is no reason for a page. Nor is a text: labels look for a page that there is. */
 const matters = (line: DrawnLine): boolean => line.type !== 'sheetEdge';
 
 /** The raster of a drawing, or null when there is nothing on it. */
 export function occupancyOf(drawing: Drawing): Occupancy | null {
-  const lines = [...drawing.lines.filter(matters), ...drawing.texts.map(baseline)];
+  const lines = drawing.lines.filter(matters);
   const points = lines.flatMap((line) => line.points);
   if (points.length === 0) return null;
   const low: Vec2 = [Math.min(...points.map(([x]) => x)) - RIM_MM, Math.min(...points.map(([, y]) => y)) - RIM_MM];

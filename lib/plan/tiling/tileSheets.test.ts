@@ -20,11 +20,14 @@ const box = (id: string, x: number, y: number, w: number, h: number) => ({
 });
 const drawing = (wMm: number, hMm: number, lines: Drawing['lines']): Drawing => ({
   id: 'sheet-1',
-  title: 'test',
+  name: 'Sheet 1',
+  material: 'test',
   sheetMm: [wMm, hMm],
   strokeMm: 0.2,
   lines,
   texts: [],
+  key: [],
+  longest: null,
 });
 const tiled = (sheet: Drawing): TiledSheet => {
   const [only] = tileSheets([sheet], PAPERS.a4, TILE_DEFAULTS);

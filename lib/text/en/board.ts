@@ -2,31 +2,6 @@
 
 export const board = { title: 'Building board', fetching: 'Fetching…' } as const;
 
-export const elements = {
-  numbered: '{name} {number}',
-  roles: {
-    wing: 'Wing',
-    foreplane: 'Foreplane',
-    tailplane: 'Tailplane',
-    fin: 'Fin',
-    vtail: 'V tail',
-    tipFin: 'Tip fin',
-  },
-  bodies: { box: 'Body', profile: 'Profile body', nacelle: 'Nacelle' },
-  boom: 'Boom',
-  drives: { propeller: 'Motor', ductedFan: 'Ducted fan' },
-  items: {
-    pack: 'Pack',
-    controller: 'Controller',
-    servo: 'Servo',
-    receiver: 'Receiver',
-    ballast: 'Ballast',
-    hardware: 'Hardware',
-    other: 'Item',
-  },
-  gear: { wheel: 'Wheel', skid: 'Skid', keel: 'Keel', towHook: 'Tow hook' },
-} as const;
-
 export const sheet = {
   region: 'Drafting sheet',
   plan: 'plan',

@@ -1,9 +1,10 @@
 // Mails, plain text. {placeholders} are filled by server/mail.
+// The first one goes to whatever address somebody typed, so it says nothing in that person's own words.
 
 export const texts = {
   verify: {
     subject: 'Confirm your mail address for Foldspar',
-    text: `Hello {name},
+    text: `Hello,
 
 open this link to confirm that this mail address is yours:
 

@@ -15,23 +15,65 @@ const page = {
   plan: 'Plan of {design}',
   cover: 'cover',
   map: 'map',
+  notes: 'lines, checks, key',
 } as const;
 
 const sheet = {
-  title: '{material}, {thickness} mm',
+  name: 'Sheet {number}',
+  material: '{material}, {thickness} mm',
+  materialWithId: '{name} ({id})',
   check: '100 mm',
   noCheck: 'no room for the 100 mm test square on this sheet',
   bevelAngle: 'bevel {angle}°',
-  foldAngle: 'fold {angle}°',
+  foldUp: 'fold {angle}° up',
+  foldDown: 'fold {angle}° down',
+  onFace: 'on the {face} face',
+  front: 'front',
+  top: 'top',
+  keyMark: 'K{number}',
+  keyNote: '{part}: {note}',
   face: '{face} face up',
 } as const;
 
 const faces = { upper: 'upper', lower: 'lower', inner: 'inner', outer: 'outer' } as const;
 
+const tubes = {
+  tube: '{outer}/{inner} mm tube',
+  rod: '{outer} mm rod',
+  strip: '{w} × {h} mm strip',
+  foamBox: '{w} × {h} mm box of foam',
+} as const;
+
+/** What to gather and how to set the aircraft up, on the first page. */
+const build = {
+  need: 'You need',
+  counted: '{count} × {what}',
+  sheet: '{material}, {thickness} mm, {w} × {h} mm',
+  tube: '{kind}, {length} mm: {name} ({id})',
+  noTube: 'no tube and no rod',
+  setUp: 'Set-up: starting values, trim in flight',
+  control: '{surface}, {control}',
+  throws: '{control}: up {up}° ({upLow}°), down {down}° ({downLow}°)',
+  rates: 'Throws at full rate, at low rate in brackets.',
+  neutralUp: '{control}: neutral {angle}° up',
+  neutralDown: '{control}: neutral {angle}° down',
+  thrust: '{drive}: thrust line {down}, {right}',
+  thrustDown: '{angle}° down',
+  thrustUp: '{angle}° up',
+  thrustRight: '{angle}° right',
+  thrustLeft: '{angle}° left',
+  pack: '{pack}: its middle {mm} mm {way} the first-flight CG (estimate)',
+  packSlides: 'It slides {fore} mm forward and {aft} mm aft of there.',
+  ahead: 'ahead of',
+  behind: 'behind',
+  more: 'and {count} more',
+} as const;
+
 const cover = {
   printTitle: 'Print at 100 %, no fit to page',
   printWords:
     'Measure these bars on the print before cutting. If one is off, the driver is resizing: turn off "fit to page" and print this page again.',
+  card: 'No rule at hand? A bank card (ISO/IEC 7810 ID-1, 85.60 × 53.98 mm) covers this outline exactly.',
   bar100: '100 mm',
   bar4in: '4 in (101.6 mm)',
   figures: 'Estimates',
@@ -46,14 +88,23 @@ const cover = {
   band: '{low} to {high}',
   notKnown: 'not worked out',
   map: 'Sheets and pages',
-  mapSheet: '{id} · {w} × {h} mm',
+  mapSheet: '{name} · {material} · {w} × {h} mm',
   mapMore: 'map continues on page {page}',
   legend: 'Lines on the parts',
   notDrawn: 'Not on these sheets',
-  notDrawnMore: 'and {count} more',
   joining: 'Joining',
-  joiningWords:
-    'Cut one edge of a pair only, at the "trim" ticks. Lay it over its neighbour until the marks with the same letter meet. Rows first, then row to row.',
+  joiningWords: [
+    'Pages overlap by {overlap} mm. Of each pair trim one page only: its left or its lower edge, at the "trim" ticks, which run through the middle of the overlap.',
+    'Lay the trimmed edge over its neighbour so that the two halves of each mark with the same letter meet. "p. 5" beside an edge is the page that joins there.',
+    'Rows first, left to right. Then row to row, from the top. Glue stick or low-tack spray: wet paper grows.',
+    'Glue the joined sheet to the foam, or pin through its corners. Every part lies with the named face up: never turn the paper over.',
+  ],
+  checks: 'Measure after joining: within 1 mm is good',
+  checkPart: '{sheet}: {part}, between its farthest corners, should read {mm} mm',
+  checkMarks: '{sheet}: from mark {a} to mark {b} should read {mm} mm',
+  key: 'Key: what had no room on its part',
+  keyMarked: '{sheet}: {mark} = {text}',
+  keyBare: '{sheet}: {text}',
   cautions: 'Before you cut',
 } as const;
 
@@ -73,7 +124,7 @@ const lines = {
   crease: 'crease, do not cut',
   bevel: 'edge of a bevel',
   paperOff: 'paper off inside this line',
-  foamOut: 'foam out to the far paper',
+  foamOut: 'foam out: as deep as noted, else to the far paper',
   glue: 'glue here',
   tape: 'tape here',
   reference: 'place line, do not cut',
@@ -97,6 +148,10 @@ const problems = {
   tooManyPages: 'this plan would take {pages} pages; at most {max} are written',
   tooManyPagesFix: 'choose a larger paper',
   unknownPaper: 'unknown paper "{paper}"; known: {known}',
+  tooManyParts: '{count} parts are too many to lay out; at most {most} are laid',
+  tooManyPartsFix: 'split the airframe into several documents, or merge small parts',
+  tooManySheets: 'the parts need more than {most} sheets',
+  tooManySheetsFix: 'list larger sheets, or split the airframe into several documents',
   strangeLayout: 'the layout places part "{part}", which is not among the parts',
 } as const;
 
@@ -123,4 +178,16 @@ const cli = {
   badJob: 'expected a job of kind "freeze" or "plan", got {got}',
 } as const;
 
-export const plan = { page, sheet, faces, cover, cautions, lines, problems, file, cli } as const;
+export const plan = {
+  page,
+  sheet,
+  faces,
+  tubes,
+  build,
+  cover,
+  cautions,
+  lines,
+  problems,
+  file,
+  cli,
+} as const;

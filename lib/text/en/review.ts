@@ -40,7 +40,7 @@ export const threads = {
   close: 'Close',
   closeOf: 'Close comment {number}',
   reopen: 'Open again',
-  reopenOf: 'Open comment {number} again',
+  reopenOf: 'Open again: comment {number}',
   closedBy: 'Closed by {name}',
   pinLabel: 'Comment {number}, {state}: {place}',
   number: 'Comment {number}',

@@ -45,7 +45,8 @@ const details = {
   threadClosed: 'This thread is closed. Open it again to go on.',
   keyReused: 'This Idempotency-Key was used for a different request.',
   keyUnreadable: 'Idempotency-Key must be 1 to 200 visible characters.',
-  tooLarge: 'The largest request is {max} MB.',
+  tooLarge: 'The largest request here is {max} kB.',
+  noNul: 'A text must not hold the character NUL.',
   wrongMediaType: 'Send application/json.',
   badJson: 'The body could not be read as JSON.',
   tooDeep: 'The JSON is nested more than {max} levels deep.',
@@ -59,6 +60,8 @@ const details = {
   engineTimedOut: 'It took longer than {seconds} s and was stopped.',
   engineFailed: 'Nothing was changed. Try again; if it fails again, tell whoever runs this server.',
   fault: 'Nothing was changed. The fault has been logged as {reference}.',
+  personName: 'A name is 1 to 80 characters on one line.',
+  tooManyInvitations: 'That is as many invitations as go out in this time. Wait {minutes} min and try again.',
   passwordTooCommon: 'This password is one of the first that would be guessed. Choose another.',
   passwordHoldsName: 'The password must not be made of your name or mail address.',
 } as const;

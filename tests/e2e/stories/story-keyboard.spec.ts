@@ -12,8 +12,8 @@ import { expect, test } from '../support/test';
 
 // The same job without a mouse: nothing is reached but by Tab, arrows, Enter and typing.
 
-const SPAN = 'Span of Wing';
-const TIP = 'Tip chord of Wing, panel p1';
+const SPAN = 'Span, wing';
+const TIP = 'Tip chord, wing';
 const PART = 'Fin, starboard';
 
 const link = (page: Page, name: string | RegExp) => page.getByRole('link', { name, exact: true });

@@ -26,9 +26,9 @@ import { expect, test } from '../support/test';
 
 // The whole job with three people at three browsers, by role, label and mouse alone.
 
-const SPAN = 'Span of Wing';
-const ROOT = 'Root chord of Wing, panel p1';
-const TIP = 'Tip chord of Wing, panel p1';
+const SPAN = 'Span, wing';
+const ROOT = 'Root chord, wing';
+const TIP = 'Tip chord, wing';
 const PART = 'Fin, starboard';
 const REASON = 'The wing was too short for the pack we have.';
 const EFFECT = 'Slower by half a metre a second, and steadier.';

@@ -3,7 +3,7 @@ import { CreateInvitation } from '@/lib/contract/bodies';
 import { createInvitation } from '@/server/acts/createInvitation';
 import { ok } from '@/server/http/answers';
 import { inWorkshop } from '@/server/http/endpoint';
-import { deliverMail } from '@/server/mail';
+import { deliverSoon } from '@/server/mail';
 
 export const GET = inWorkshop('GET /api/workshops/[workshop]/invitations', async ({ db, member, context }) =>
   ok(await openInvitations(db, member.workshopId, context.now)),
@@ -15,6 +15,6 @@ export const POST = inWorkshop('POST /api/workshops/[workshop]/invitations', asy
     (context) => createInvitation(context, call.member, body),
     (made) => `/api/workshops/${call.member.workshopId}/invitations/${made.id}`,
   );
-  await deliverMail(call.db, call.context.now);
+  deliverSoon(call.db, call.context.now);
   return answer;
 });
