@@ -8,6 +8,7 @@ import type { ExportFile, Frozen } from '@/lib/plan/job';
 import { layoutProblems, makePlan } from '@/lib/plan/makePlan';
 import type { PlanFile } from '@/lib/plan/manifest';
 import { PAPERS, paperById } from '@/lib/plan/paper';
+import type { PlanFonts } from '@/lib/plan/pdf/fonts';
 import { plan } from '@/lib/text/en/plan';
 import { fill } from '@/lib/text/fill';
 import { readFonts } from './fonts';
@@ -29,8 +30,13 @@ export function freeze(airframe: Airframe): Result<Frozen> {
 /** What to print: frozen artefacts as they were released, otherwise computed now. */
 export const artefactsOf = (file: ExportFile): Frozen => file.frozen ?? compute(file.airframe);
 
-/** The plan of a file on a paper by its id. */
-export async function planOf(file: ExportFile, artefacts: Frozen, paperId: string): Promise<Result<PlanFile>> {
+/** The plan of a file on a paper by its id. `fonts` reads the fonts where the program does not run from its bundle. */
+export async function planOf(
+  file: ExportFile,
+  artefacts: Frozen,
+  paperId: string,
+  fonts: () => Promise<PlanFonts> | PlanFonts = readFonts,
+): Promise<Result<PlanFile>> {
   const paper = paperById(paperId);
   if (!paper) {
     const message = fill(plan.problems.unknownPaper, { paper: paperId, known: Object.keys(PAPERS).join(', ') });
@@ -41,6 +47,6 @@ export async function planOf(file: ExportFile, artefacts: Frozen, paperId: strin
     ...artefacts,
     paper,
     revision: file.revision,
-    fonts: await readFonts(),
+    fonts: await fonts(),
   });
 }

@@ -84,7 +84,9 @@ describe('pages as they are read', () => {
   it('tiles are named by sheet, row and column as the manifest has them', () => {
     for (const { id, pages } of file.manifest.sheets) {
       for (const { page, row, col } of pages) {
-        expect(textOf(pdf, page)).toContain(`${id} · row ${row + 1} · column ${col + 1}`);
+        // "sheet-2" in the manifest is "Sheet 2" on paper.
+        const name = id.replace('sheet-', 'Sheet ');
+        expect(textOf(pdf, page)).toContain(`${name} · row ${row + 1} · column ${col + 1}`);
       }
     }
   });

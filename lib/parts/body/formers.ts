@@ -6,7 +6,7 @@ import { texts } from '@/lib/text/en/parts';
 import { fill } from '@/lib/text/fill';
 import { trimmedDigits } from '@/lib/units/number';
 import type { Draft } from '../draft';
-import { lineMeet } from '../shape/cut';
+import { lineMeet } from '@/lib/geometry/lines';
 import { toPart, unit3 } from '../shape/frame';
 import { heightAt, type Polyline } from '../shape/polyline';
 import { cleanRing } from '../shape/ring';

@@ -68,11 +68,3 @@ export function rayTo(ring: Ring, from: Vec2, direction: Vec2): Vec2 | null {
   }
   return Number.isFinite(nearest) ? [from[0] + dx * nearest, from[1] + dy * nearest] : null;
 }
-
-/** Where two lines, each a point and a direction, meet; null when they are parallel. */
-export function lineMeet(p: Vec2, along: Vec2, q: Vec2, other: Vec2): Vec2 | null {
-  const across = along[0] * other[1] - along[1] * other[0];
-  if (Math.abs(across) < 1e-12 * Math.hypot(...along) * Math.hypot(...other)) return null;
-  const t = ((q[0] - p[0]) * other[1] - (q[1] - p[1]) * other[0]) / across;
-  return [p[0] + along[0] * t, p[1] + along[1] * t];
-}

@@ -13,8 +13,6 @@ export const NOTHING_MM = 1e-6;
 export const turnOf = (a: Vec2, b: Vec2, c: Vec2): number =>
   (b[0] - a[0]) * (c[1] - a[1]) - (b[1] - a[1]) * (c[0] - a[0]);
 
-export const distance = (a: Vec2, b: Vec2): number => Math.hypot(b[0] - a[0], b[1] - a[1]);
-
 /** The same point seen from the back of the sheet; no minus zero, which would print and hash differently. */
 export const mirror2 = ([x, y]: Vec2): Vec2 => [x === 0 ? 0 : -x, y];
 

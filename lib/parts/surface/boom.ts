@@ -6,7 +6,7 @@ import { lerp3, mirror3, type Vec2, type Vec3 } from '@/lib/numerics/vec';
 import { texts } from '@/lib/text/en/parts';
 import { fill } from '@/lib/text/fill';
 import { trimmedDigits } from '@/lib/units/number';
-import { lineMeet } from '../shape/cut';
+import { lineMeet } from '@/lib/geometry/lines';
 import { offPart, toPart } from '../shape/frame';
 import { distanceToEdge, NOTHING_MM, type Ring } from '../shape/ring';
 import type { Operation } from '../types';

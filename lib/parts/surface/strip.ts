@@ -1,5 +1,5 @@
 import type { Vec2 } from '@/lib/numerics/vec';
-import { lineMeet } from '../shape/cut';
+import { lineMeet } from '@/lib/geometry/lines';
 import { toPart } from '../shape/frame';
 import type { Polyline } from '../shape/polyline';
 import { cleanRing, mirror2 } from '../shape/ring';

@@ -4,13 +4,13 @@ import type { BuildNotes } from '../buildNotes';
 import type { PageFormat } from '../tiling/grid';
 import type { TiledSheet } from '../tiling/tileSheets';
 import { bar } from './bars';
-import { card } from './card';
 import { type Column, heading, paragraph } from './column';
 import { estimates } from './estimates';
 import type { Typefaces } from './fonts';
 import type { FrontContext, FrontInput } from './front';
 import { type PlanNames, stateWords } from './furniture';
 import { letter, lineStyle, path, shorten, wrap } from './ink';
+import { legend } from './legend';
 import { type Frame, map } from './map';
 
 const words = plan.cover;
@@ -56,20 +56,21 @@ function title(faces: Typefaces, { design, revision }: PlanNames, frame: Frame):
   ].join('\n');
 }
 
-/** The 100 mm and 4 in bars along two sides of a square, with the outline of a bank card inside it. */
-function checks(faces: Typefaces, x: number, y: number): string {
+/** The 100 mm and 4 in bars along two sides of a square, with the legend inside it. */
+function checks(faces: Typefaces, { sheets }: FrontInput, x: number, y: number): string {
   const [x0, y0] = [x + 13, y + 13];
   const metric = { lengthMm: 100, label: words.bar100, capMm: 2, everyMm: 10, labelSide: 'after' } as const;
   const inch = { lengthMm: 101.6, label: words.bar4in, capMm: 2, everyMm: 25.4, labelSide: 'after' } as const;
-  const inside: Column = { x: x0 + 10, widthMm: 85.6 };
-  const said = paragraph(faces, words.card, inside, y0 + 82, { face: 'text', capMm: 1.9 });
+  const inside: Column = { x: x0 + 10, widthMm: 86 };
+  const head = heading(faces, words.legend, inside, y0 + 100);
+  const drawings = sheets.map(({ drawing }) => drawing);
   return [
     bar(faces, { ...metric, from: [x0, y0], upwards: false }),
     bar(faces, { ...metric, from: [x0, y0], upwards: true }),
     bar(faces, { ...inch, from: [x0, y0 - 8], upwards: false }),
     bar(faces, { ...inch, from: [x0 - 8, y0], upwards: true }),
-    said.ink,
-    card([inside.x, y0 + 15]),
+    head.ink,
+    legend(faces, drawings, inside, head.top),
   ].join('\n');
 }
 
@@ -115,7 +116,7 @@ function lists(faces: Typefaces, build: BuildNotes | null, frame: Column, top: n
   return { ink: [need.ink, setUp.ink].join('\n'), top: Math.min(need.top, setUp.top) };
 }
 
-/** The first page: name and state, estimates, what to gather and set, map, lengths to measure, how to print, cautions. */
+/** The first page: name and state, estimates, what to gather and set, map, check bars, legend, how to print, cautions. */
 export function cover(faces: Typefaces, format: PageFormat, input: FrontInput, context: FrontContext): string {
   const [x0, y0, x1, y1] = format.clipMm;
   const frame: Frame = { x: x0, y: y0, w: x1 - x0, h: y1 - y0 };
@@ -140,7 +141,7 @@ export function cover(faces: Typefaces, format: PageFormat, input: FrontInput, c
         })
       : '',
     map(faces, input.sheets.slice(0, MAP_FIRST), mapFrame, context.pageOf),
-    checks(faces, frame.x, frame.y),
+    checks(faces, input, frame.x, frame.y),
     advice(faces, column, y0 + CHECK_MM),
   ]
     .filter(Boolean)

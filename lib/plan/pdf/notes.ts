@@ -3,13 +3,13 @@ import { fill } from '@/lib/text/fill';
 import type { PageFormat } from '../tiling/grid';
 import { joinChecks } from '../tiling/joinChecks';
 import type { TiledSheet } from '../tiling/tileSheets';
+import { card, ID1_MM } from './card';
 import { type Column, heading, paragraph } from './column';
 import type { Typefaces } from './fonts';
 import type { FrontInput, FrontPage } from './front';
 import { letter } from './ink';
-import { legend } from './legend';
 
-// The pages for the bench: what each line asks for, how to join, lengths to measure, and the key of marks on small parts.
+// The pages for the bench: a card to check the scale, how to join, lengths to measure, and the key of marks on small parts.
 
 const words = plan.cover;
 
@@ -18,9 +18,8 @@ const ROW_MM = 3.7;
 const ROW_STYLE = { face: 'text', capMm: 1.8 } as const;
 /** Mean width of a letter over the height of a capital, rounded up. */
 const LETTER_SHARE = 0.84;
-/** Height of legend and joining on top of the first of these pages. */
+/** Height of card and joining on top of the first of these pages. */
 const TOP_MM = 80;
-const LEGEND_MM = 100;
 
 interface Section {
   readonly title: string;
@@ -87,23 +86,24 @@ const keyRows = (sheets: readonly TiledSheet[]): string[] =>
   );
 
 function topOf(faces: Typefaces, input: FrontInput, frame: Column, top: number): string {
-  const lines: Column = { x: frame.x, widthMm: Math.min(LEGEND_MM, frame.widthMm * 0.55) };
-  const x = lines.x + lines.widthMm + 6;
+  const text = { face: 'text', capMm: 1.9 } as const;
+  const scale: Column = { x: frame.x, widthMm: ID1_MM[0] };
+  const x = scale.x + scale.widthMm + 10;
   const joining: Column = { x, widthMm: frame.x + frame.widthMm - x };
-  const drawings = input.sheets.map(({ drawing }) => drawing);
-  const lineHead = heading(faces, words.legend, lines, top);
+  const scaleHead = heading(faces, words.cardTitle, scale, top);
+  const said = paragraph(faces, words.card, scale, scaleHead.top, text);
   const joinHead = heading(faces, words.joining, joining, top);
-  const ink = [lineHead.ink, legend(faces, drawings, lines, lineHead.top), joinHead.ink];
+  const ink = [scaleHead.ink, said.ink, card([scale.x, said.top - 2 - ID1_MM[1]]), joinHead.ink];
   let at = joinHead.top;
-  for (const text of words.joiningWords) {
-    const made = paragraph(faces, fill(text, { overlap: input.overlapMm }), joining, at, { face: 'text', capMm: 1.9 });
+  for (const line of words.joiningWords) {
+    const made = paragraph(faces, fill(line, { overlap: input.overlapMm }), joining, at, text);
     ink.push(made.ink);
     at = made.top - 1.4;
   }
   return ink.join('\n');
 }
 
-/** Lines, joining, check lengths, key, and what is not on the sheets; one page, more when the key is long. */
+/** Scale, joining, check lengths, key, and what is not on the sheets; one page, more when the key is long. */
 export function notesPages(format: PageFormat, input: FrontInput): FrontPage[] {
   const [x0, y0, x1, y1] = format.clipMm;
   const frame: Column = { x: x0, widthMm: x1 - x0 };

@@ -15,7 +15,7 @@ const page = {
   plan: 'Plan of {design}',
   cover: 'cover',
   map: 'map',
-  notes: 'lines, checks, key',
+  notes: 'scale, joining, key',
 } as const;
 
 const sheet = {
@@ -73,7 +73,8 @@ const cover = {
   printTitle: 'Print at 100 %, no fit to page',
   printWords:
     'Measure these bars on the print before cutting. If one is off, the driver is resizing: turn off "fit to page" and print this page again.',
-  card: 'No rule at hand? A bank card (ISO/IEC 7810 ID-1, 85.60 × 53.98 mm) covers this outline exactly.',
+  cardTitle: 'No rule at hand?',
+  card: 'A bank card (ISO/IEC 7810 ID-1, 85.60 × 53.98 mm) covers this outline exactly.',
   bar100: '100 mm',
   bar4in: '4 in (101.6 mm)',
   figures: 'Estimates',

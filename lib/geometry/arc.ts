@@ -1,5 +1,5 @@
 import type { Vec2 } from '@/lib/numerics/vec';
-import { distance } from './ring';
+import { distance } from './lines';
 
 /** An arc is drawn as straight pieces that leave it by at most this, mm: half a knife's kerf. */
 export const ARC_TOLERANCE_MM = 0.05;
