@@ -173,6 +173,16 @@ describe('keys', () => {
     expect(problem?.message).toContain(`"${path.split('.').at(-1)}"`);
     expect(problem?.fix).toContain(fix);
   });
+  it('guesses at slips only, so that a flood of keys costs no more than reading them', () => {
+    const flood = Object.fromEntries(Array.from({ length: 60 }, (_, index) => [`surfaces${index}`, 0]));
+    const long = `${'surfaces'.repeat(8)}s`;
+    const result = parseAirframe({ ...startFrom('pusher', 'Test'), [long]: 0, ...flood });
+    const fixes = new Map(result.ok ? [] : result.problems.map(({ path, fix }) => [path, fix ?? '']));
+    expect(fixes.get('surfaces0')).toBe('did you mean "surfaces"?');
+    expect(fixes.get(long)).toContain('remove it');
+    // Fifty rows and one that counts the rest.
+    expect(fixes.size).toBe(51);
+  });
   it.each(['__proto__', 'constructor', 'prototype'])('refuses the key %s', (key) => {
     const text = JSON.stringify(pusher).replace('"booms":', `"${key}":{"polluted":true},"booms":`);
     expect(parseAirframeText(text)).toMatchObject({ ok: false, problems: [{ code: 'forbidden-key', path: key }] });

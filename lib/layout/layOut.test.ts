@@ -168,4 +168,19 @@ describe('layOut', () => {
     expect(() => layOut([], [sheet()], { ...LAYOUT_DEFAULTS, spacingMm: Number.NaN })).toThrow(/spacingMm.*NaN/);
     expect(() => layOut([], [sheet()], { ...LAYOUT_DEFAULTS, marginMm: -1 })).toThrow(/marginMm.*-1/);
   });
+
+  it('lays nothing over 2000 parts, and says the first part over and both numbers', () => {
+    const many = Array.from({ length: 10_000 }, (_, i) => makePart(`p/${i}`, rectangle(20, 20)));
+    const layout = layOut(many, [sheet()], LAYOUT_DEFAULTS);
+    expect(layout.sheets).toEqual([]);
+    expect(layout.failures).toEqual([{ kind: 'too-many-parts', partKey: 'p/2000', count: 10_000, most: 2000 }]);
+  });
+
+  it('opens no more than 200 sheets; the parts left are failures', () => {
+    const many = Array.from({ length: 203 }, (_, i) => makePart(`p/${i}`, rectangle(680, 480)));
+    const layout = layOut(many, [sheet()], LAYOUT_DEFAULTS);
+    expect(layout.sheets).toHaveLength(200);
+    expect(layout.failures.map(({ kind }) => kind)).toEqual(Array(3).fill('too-many-sheets'));
+    assertSound(many, layout);
+  });
 });

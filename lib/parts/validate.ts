@@ -1,7 +1,8 @@
+import { distance } from '@/lib/geometry/lines';
 import { bounds, contains, edges, signedArea } from '@/lib/geometry/polygons';
 import { SAME_POINT_MM } from '@/lib/numerics/tolerances';
 import { dot3, length3 } from '@/lib/numerics/vec';
-import { distance, edgesCross, NOTHING_MM, onSheet, type Ring, selfCrossing } from './shape/ring';
+import { edgesCross, NOTHING_MM, onSheet, type Ring, selfCrossing } from './shape/ring';
 import type { Part, PartFrame } from './types';
 
 // A part knows how to check itself: what is found here is a fault of the program or a document that no sheet can follow.

@@ -8,7 +8,7 @@ import { fill } from '@/lib/text/fill';
 import { trimmedDigits } from '@/lib/units/number';
 import { partLines } from './draw/partLines';
 import { type Key, newKey, partTexts } from './draw/partTexts';
-import type { Box } from './draw/room';
+import { type Box, isIn } from './draw/room';
 import { type Segment, segmentsOf } from './draw/segments';
 import type { Drawing, DrawnLine, DrawnText } from './drawing';
 
@@ -65,27 +65,31 @@ const square = (x: number, y: number, w: number, h: number): Vec2[] => [
   [x, y + h],
 ];
 
-function drawCheck(sheet: LaidSheet): { lines: DrawnLine[]; texts: DrawnText[] } {
+/** Where along an edge of the test square its length may be written. */
+const CHECK_SHARES = [0.5, 0.25, 0.75, 0.12, 0.88] as const;
+const CHECK_CAP_MM = 3;
+/** Half of the room that the words take along an edge, mm. */
+const CHECK_REACH_MM = 10;
+
+function drawCheck(sheet: LaidSheet, windows: readonly Box[]): { lines: DrawnLine[]; texts: DrawnText[] } {
   if (!sheet.checkSquareMm) {
     const text = plan.sheet.noCheck;
     const at: Vec2 = [sheet.wMm / 2, 1.2];
     return { lines: [], texts: [{ at, text, heightMm: 2, angleDeg: 0, font: 'text', align: 'centre' }] };
   }
   const [x, y] = sheet.checkSquareMm;
-  const half = CHECK_SQUARE_MM / 2;
-  const text = (at: Vec2, angleDeg: number): DrawnText => ({
-    at,
-    text: plan.sheet.check,
-    heightMm: 3,
-    angleDeg,
-    font: 'mono',
-    align: 'centre',
+  const side = CHECK_SQUARE_MM;
+  const texts = ([0, 90] as const).map((angleDeg): DrawnText => {
+    const on = (along: number): Vec2 => (angleDeg === 0 ? [x + along, y + 4] : [x + 4, y + along]);
+    const onePage = CHECK_SHARES.find((share) =>
+      windows.some((window) => [-1, 1].every((end) => isIn(on(share * side + end * CHECK_REACH_MM), window))),
+    );
+    const at = on((onePage ?? 0.5) * side);
+    return { at, text: plan.sheet.check, heightMm: CHECK_CAP_MM, angleDeg, font: 'mono', align: 'centre' };
   });
   return {
-    lines: [
-      { id: `${sheet.id}#check`, type: 'check', points: square(x, y, CHECK_SQUARE_MM, CHECK_SQUARE_MM), closed: true },
-    ],
-    texts: [text([x + half, y + 4], 0), text([x + 4, y + half], 90)],
+    lines: [{ id: `${sheet.id}#check`, type: 'check', points: square(x, y, side, side), closed: true }],
+    texts,
   };
 }
 
@@ -106,7 +110,7 @@ function drawSheet(
     const lines = partLines(part, placement);
     return { lines, texts: withoutTexts ? [] : textsOf(part, placement, lines, shown, key) };
   });
-  const check = drawCheck(sheet);
+  const check = drawCheck(sheet, shown);
   const edge: DrawnLine = {
     id: `${sheet.id}#edge`,
     type: 'sheetEdge',

@@ -38,6 +38,11 @@ describe('parseExport', () => {
     expect(parseExport(whole)).toEqual({ ok: true, value: whole });
   });
 
+  it('keeps the engine that computed the frozen figures', () => {
+    const result = parseExport({ airframe, frozen: { ...frozen, figures: { ...frozen.figures, engine: '2031.4' } } });
+    expect(result).toMatchObject({ ok: true, value: { frozen: { figures: { engine: '2031.4' } } } });
+  });
+
   it.each([
     { name: 'an unknown key', input: { airframe, layout: 1 }, path: 'layout' },
     {
@@ -81,6 +86,11 @@ describe('parseExport', () => {
         },
       },
       path: 'frozen.development.parts.0.outline',
+    },
+    {
+      name: 'frozen figures that do not say which engine computed them',
+      input: { airframe, frozen: { ...frozen, figures: { ...frozen.figures, engine: undefined } } },
+      path: 'frozen.figures.engine',
     },
     { name: 'a list', input: [], path: '' },
     { name: 'an object that is neither', input: { wing: 1 }, path: '' },

@@ -1,5 +1,5 @@
 import { type ChildProcess, fork } from 'node:child_process';
-import { cpSync, existsSync, mkdtempSync, rmSync } from 'node:fs';
+import { chmodSync, cpSync, existsSync, mkdtempSync, rmSync, statSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { dirname, join } from 'node:path';
 import { Client } from 'pg';
@@ -90,6 +90,15 @@ describe('one process a folder', () => {
     const all = await Promise.all([open(), open(), open(), open()]);
     expect(all.filter(({ ready }) => ready)).toHaveLength(1);
     expect(all.filter(({ child }) => child.exitCode === 3)).toHaveLength(3);
+  });
+});
+
+describe('the files', () => {
+  it('are closed to other users even in a folder that is open to them', async () => {
+    chmodSync(folder, 0o755);
+    chmodSync(join(folder, 'database'), 0o755);
+    expect((await open()).ready).toBe(true);
+    expect(statSync(join(folder, 'database')).mode & 0o777).toBe(0o700);
   });
 });
 

@@ -1,12 +1,12 @@
 import type { Body } from '@/lib/airframe/schema/fuselage';
 import type { Material } from '@/lib/airframe/schema/stock';
+import { lineMeet } from '@/lib/geometry/lines';
 import type { Problem } from '@/lib/numerics/result';
 import { add3, cross3, degFromRad, dot3, radFromDeg, scale3, sub3, type Vec2, type Vec3 } from '@/lib/numerics/vec';
 import { texts } from '@/lib/text/en/parts';
 import { fill } from '@/lib/text/fill';
 import { trimmedDigits } from '@/lib/units/number';
 import type { Draft } from '../draft';
-import { lineMeet } from '@/lib/geometry/lines';
 import { toPart, unit3 } from '../shape/frame';
 import { heightAt, type Polyline } from '../shape/polyline';
 import { cleanRing } from '../shape/ring';

@@ -1,9 +1,9 @@
+import { distance, lineMeet } from '@/lib/geometry/lines';
 import { contains, edges } from '@/lib/geometry/polygons';
 import { SAME_POINT_MM } from '@/lib/numerics/tolerances';
 import type { Vec2 } from '@/lib/numerics/vec';
 import type { Operation } from '../types';
-import { lineMeet } from '@/lib/geometry/lines';
-import { distance, distanceToEdge, distanceToRing, NOTHING_MM, onSheet, type Ring } from './ring';
+import { distanceToEdge, distanceToRing, NOTHING_MM, onSheet, type Ring } from './ring';
 
 // Lines worked on a sheet end where the sheet does: what lies over an opening is not there to be worked.
 

@@ -1,6 +1,7 @@
+import { distance } from '@/lib/geometry/lines';
 import { edges } from '@/lib/geometry/polygons';
 import type { Vec2 } from '@/lib/numerics/vec';
-import { cleanRing, distance, distanceToEdge, NOTHING_MM, type Ring } from './ring';
+import { cleanRing, distanceToEdge, NOTHING_MM, type Ring } from './ring';
 
 // Cutting a ring along a path whose two ends lie on its edge. Exact: no point of the ring moves.
 

@@ -1,10 +1,11 @@
+import { distance } from '@/lib/geometry/lines';
 import { contains, edges, signedArea } from '@/lib/geometry/polygons';
 import { SAME_POINT_MM } from '@/lib/numerics/tolerances';
 import { scale3, sub3, type Vec2, type Vec3 } from '@/lib/numerics/vec';
 import type { Operation, Part, PartFrame } from '../types';
 import { cutRing } from './cut';
 import { fromPart, normalOf, turnFrame, unit3 } from './frame';
-import { distance, edgesCross, type Ring, turnOf } from './ring';
+import { edgesCross, type Ring, turnOf } from './ring';
 
 // Where the flat pieces of a folded part stand in the aircraft. The part is parted along its folds; each piece beyond a fold
 // is turned about the face that the fold leaves whole. The piece with the outline's first corner stands in the part's frame.

@@ -1,3 +1,4 @@
+import { distance } from '@/lib/geometry/lines';
 import { contains, edges } from '@/lib/geometry/polygons';
 import { SAME_POINT_MM } from '@/lib/numerics/tolerances';
 import type { Vec2 } from '@/lib/numerics/vec';

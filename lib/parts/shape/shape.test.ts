@@ -1,9 +1,9 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import { ARC_TOLERANCE_MM, arcPoints } from '@/lib/geometry/arc';
 import { signedArea } from '@/lib/geometry/polygons';
 import type { Vec2 } from '@/lib/numerics/vec';
 import { unroll } from '../body/unroll';
-import { ARC_TOLERANCE_MM, arcPoints } from '@/lib/geometry/arc';
 import { cutRing } from './cut';
 import { offsetLine } from './polyline';
 import { cleanRing, edgesCross, mirrorRing } from './ring';

@@ -1,12 +1,12 @@
 import type { ResolvedBoom } from '@/lib/airframe/resolved';
 import type { Boom } from '@/lib/airframe/schema/fuselage';
 import type { Tube } from '@/lib/airframe/schema/stock';
+import { lineMeet } from '@/lib/geometry/lines';
 import { contains, edges } from '@/lib/geometry/polygons';
 import { lerp3, mirror3, type Vec2, type Vec3 } from '@/lib/numerics/vec';
 import { texts } from '@/lib/text/en/parts';
 import { fill } from '@/lib/text/fill';
 import { trimmedDigits } from '@/lib/units/number';
-import { lineMeet } from '@/lib/geometry/lines';
 import { offPart, toPart } from '../shape/frame';
 import { distanceToEdge, NOTHING_MM, type Ring } from '../shape/ring';
 import type { Operation } from '../types';

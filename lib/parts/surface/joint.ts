@@ -1,4 +1,5 @@
 import type { ResolvedPanel, Section } from '@/lib/airframe/resolved';
+import { distance } from '@/lib/geometry/lines';
 import type { Problem } from '@/lib/numerics/result';
 import { SAME_POINT_MM } from '@/lib/numerics/tolerances';
 import {
@@ -14,7 +15,7 @@ import {
 } from '@/lib/numerics/vec';
 import { texts } from '@/lib/text/en/parts';
 import { normalOf } from '../shape/frame';
-import { distance, distanceToEdge, type Ring } from '../shape/ring';
+import { distanceToEdge, type Ring } from '../shape/ring';
 import type { Face, Operation } from '../types';
 import { meetsItsMirror, panelFrame, quarterPoint, type Run } from './run';
 import { type Across, endOf, type Strip, trimStrip } from './strip';

@@ -1,5 +1,5 @@
-import type { Vec2 } from '@/lib/numerics/vec';
 import { lineMeet } from '@/lib/geometry/lines';
+import type { Vec2 } from '@/lib/numerics/vec';
 import { toPart } from '../shape/frame';
 import type { Polyline } from '../shape/polyline';
 import { cleanRing, mirror2 } from '../shape/ring';

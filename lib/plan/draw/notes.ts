@@ -51,11 +51,28 @@ export function besideLongest(path: readonly Vec2[], closed: boolean): Spot[] {
   );
 }
 
-/** How far a part's plane must follow an axis before an edge of it is called the front or the top one. */
+/** How far a part's plane must follow an axis, and an edge face it, for the edge to be called the front or the top one. */
 const FOLLOWS = 0.7;
-const INWARD_MM = [4, 6, 9, 13, 18, 25] as const;
+const INWARD_MM = [3.5, 5, 8, 12] as const;
+const ALONG = [0.5, 0.35, 0.65, 0.2, 0.8] as const;
+/** Edges shorter than this, mm, have no room for a word. */
+const LEAST_EDGE_MM = 5;
 
-/** Which edge of a part points forward or, on a part that stands across the aircraft, upward; seen on the sheet. */
+/** The edges of a counter-clockwise ring that look in a direction, the farthest that way first. */
+function edgesFacing(outline: readonly Vec2[], [dx, dy]: Vec2): Segment[] {
+  const reach = ([[ax, ay], [bx, by]]: Segment): number => (ax + bx) * dx + (ay + by) * dy;
+  return segmentsOf(outline, true)
+    .filter(([[ax, ay], [bx, by]]) => {
+      const length = Math.hypot(bx - ax, by - ay);
+      return length > LEAST_EDGE_MM && ((by - ay) * dx - (bx - ax) * dy) / length > FOLLOWS;
+    })
+    .sort((a, b) => reach(b) - reach(a));
+}
+
+/**
+ * Which edge of a placed part is the front one or, on a part that stands across the aircraft, the top one, with the spots
+ * where that may be written inside it. Null when no edge looks that way.
+ */
 export function leadingEdge(
   part: Part,
   outline: readonly Vec2[],
@@ -66,20 +83,20 @@ export function leadingEdge(
   const upward: Vec2 = [ex[2], ey[2]];
   const isForward = Math.hypot(...forward) > FOLLOWS;
   if (!isForward && Math.hypot(...upward) <= FOLLOWS) return null;
-  const direction = turn(isForward ? forward : upward);
-  const size = Math.hypot(...direction);
-  const [dx, dy] = [direction[0] / size, direction[1] / size];
-  const reach = ([x, y]: Vec2): number => x * dx + y * dy;
-  const farthest = Math.max(...outline.map(reach));
-  const tips = outline.filter((point) => reach(point) > farthest - 0.5);
-  const across = tips.map(([x, y]) => y * dx - x * dy);
-  const [low, high] = [Math.min(...across), Math.max(...across)];
-  const angleDeg = (Math.atan2(dx, -dy) * 180) / Math.PI;
-  const spots = INWARD_MM.flatMap((inward) =>
-    [0.5, 0.3, 0.7, 0.15, 0.85].map((share): Spot => {
-      const [a, c] = [farthest - inward, low + (high - low) * share];
-      return { at: [dx * a - dy * c, dy * a + dx * c], angleDeg };
-    }),
-  );
-  return { text: isForward ? words.front : words.top, spots };
+  const [x, y] = turn(isForward ? forward : upward);
+  const size = Math.hypot(x, y);
+  const spots = edgesFacing(outline, [x / size, y / size]).flatMap(([[ax, ay], [bx, by]]) => {
+    const [ux, uy] = [bx - ax, by - ay];
+    const length = Math.hypot(ux, uy);
+    const angleDeg = (Math.atan2(uy, ux) * 180) / Math.PI;
+    return INWARD_MM.flatMap((inward) =>
+      ALONG.map(
+        (share): Spot => ({
+          at: [ax + ux * share - (uy / length) * inward, ay + uy * share + (ux / length) * inward],
+          angleDeg,
+        }),
+      ),
+    );
+  });
+  return spots.length === 0 ? null : { text: isForward ? words.front : words.top, spots };
 }

@@ -1,7 +1,6 @@
 import type { Vec2 } from '@/lib/numerics/vec';
 import { plan } from '@/lib/text/en/plan';
 import { fill } from '@/lib/text/fill';
-import { trimmedDigits } from '@/lib/units/number';
 import type { TiledSheet } from '../tiling/tileSheets';
 import type { Typefaces } from './fonts';
 import { box, grey, group, letter, lineStyle, path, shift, shorten } from './ink';
@@ -82,14 +81,12 @@ export function map(
   const { cols, scale, cell } = gridFor(sheets, frame);
   const parts = sheets.map((sheet, i) => {
     const [col, row] = [i % cols, Math.floor(i / cols)];
-    const [w, h] = sheet.drawing.sheetMm;
+    const [, h] = sheet.drawing.sheetMm;
     const left = frame.x + col * (cell[0] + GAP_MM);
     const top = frame.y + frame.h - row * (cell[1] + GAP_MM);
     const name = fill(plan.cover.mapSheet, {
       name: sheet.drawing.name,
       material: sheet.drawing.material,
-      w: trimmedDigits(w, 1),
-      h: trimmedDigits(h, 1),
     });
     const style = { face: 'mono', capMm: 1.7 } as const;
     const words = shorten(faces, name, cell[0], style);

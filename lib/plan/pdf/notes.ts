@@ -13,13 +13,13 @@ import { letter } from './ink';
 
 const words = plan.cover;
 
-const HEAD_MM = 9;
+const HEAD_MM = 6.5;
 const ROW_MM = 3.7;
 const ROW_STYLE = { face: 'text', capMm: 1.8 } as const;
 /** Mean width of a letter over the height of a capital, rounded up. */
 const LETTER_SHARE = 0.84;
 /** Height of card and joining on top of the first of these pages. */
-const TOP_MM = 80;
+const TOP_MM = 78;
 
 interface Section {
   readonly title: string;

@@ -28,13 +28,18 @@ export function checkPairs(marks: readonly Mark[]): Pair[] {
   return wide && across(wide) > 50 ? [long, wide] : [long];
 }
 
-/** What to measure on a sheet once its pages are joined, one line each; a sheet on a single page needs no such check. */
-export function joinChecks({ drawing: { name: sheet, longest }, pages }: TiledSheet): string[] {
-  if (pages.length < 2) return [];
+/** What to measure on a sheet's pages, one line each. A sheet on a single page has no joint to check. */
+export function joinChecks({ drawing, pages }: TiledSheet): string[] {
+  const { name: sheet, longest, lines } = drawing;
+  const rows = lines.some(({ type }) => type === 'check') ? [] : [fill(words.checkNoSquare, { sheet })];
+  if (pages.length < 2) return rows;
+  if (longest) {
+    rows.push(fill(words.checkPart, { sheet, part: longest.name, mm: fixedDigits(longest.lengthMm, 1) }));
+  }
   const marks = [...new Map(pages.flatMap((page) => page.marks.map((mark) => [mark.letter, mark]))).values()];
-  const lines = checkPairs(marks).map((pair) =>
-    fill(words.checkMarks, { sheet, a: pair[0].letter, b: pair[1].letter, mm: fixedDigits(lengthOf(pair), 1) }),
-  );
-  if (!longest) return lines;
-  return [fill(words.checkPart, { sheet, part: longest.name, mm: fixedDigits(longest.lengthMm, 1) }), ...lines];
+  for (const pair of checkPairs(marks)) {
+    const [a, b] = pair;
+    rows.push(fill(words.checkMarks, { sheet, a: a.letter, b: b.letter, mm: fixedDigits(lengthOf(pair), 1) }));
+  }
+  return rows;
 }
