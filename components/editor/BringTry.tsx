@@ -33,6 +33,8 @@ export function BringTry({ workshopId }: { readonly workshopId: string }) {
     act(async () => {
       const { data } = await api.post<DesignSummary>(apiPaths.designs(workshopId), { name: airframe.name, airframe });
       dropTry();
+      // The way back must lead to a list that holds the new design.
+      router.refresh();
       router.push(paths.board(workshopId, data.id));
     });
   return (

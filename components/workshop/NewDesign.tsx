@@ -51,6 +51,8 @@ function NewDesignForm({ workshopId, layouts }: NewDesignProps) {
     if (name.trim() === '') return setProblem({ message: '', fields: { name: ui.required } });
     await act(async () => {
       const { data } = await api.post<DesignSummary>(apiPaths.designs(workshopId), { name: name.trim(), layout });
+      // The way back must lead to a list that holds the new design.
+      router.refresh();
       router.push(paths.board(workshopId, data.id));
     });
   };

@@ -6,7 +6,7 @@ import { signIn } from './support/people';
 import { openWorkshop } from './support/story';
 import { expect, test } from './support/test';
 
-const SPAN = 'Span of Wing';
+const SPAN = 'Span, wing';
 const LAYOUT = 'Twin-boom pusher';
 
 test('a visitor shapes an aircraft without an account, and it is still there on the next visit', async ({ page }) => {

@@ -82,7 +82,10 @@ describe('sheets', () => {
     const ids: string[] = manifest.sheets.map(({ id }: { id: string }) => id);
     const files = ids.flatMap((id) => [`${id}.svg`, `${id}.dxf`]);
     expect(readdirSync(join(folder, 'a4')).sort()).toEqual([...files, 'manifest.json', 'plan.pdf'].sort());
-    expect(textOf(join(folder, 'a4/plan.pdf'))).toContain('DRAFT');
+    const words = textOf(join(folder, 'a4/plan.pdf'));
+    for (const said of ['DRAFT', 'Sheet 1 · paper-faced board, 5 mm', '5/3 mm tube, 470 mm', 'up 15° (10.1°)']) {
+      expect(words).toContain(said);
+    }
   });
 
   it('gives the same bytes again, and as a job', () => {

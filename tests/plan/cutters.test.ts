@@ -63,6 +63,31 @@ describe('DXF', () => {
   });
 });
 
+describe('DXF texts', () => {
+  it('stand with their middle where the label has room, as on paper', () => {
+    const [first] = laid();
+    if (!first) throw new Error('nothing was laid');
+    const entities = new DxfParser().parseSync(writeDxf(first.drawing))?.entities ?? [];
+    const wing = first.drawing.texts.find(({ text }) => text === 'Wing panel, stbd');
+    const found = entities.find((entity) => 'text' in entity && entity.text === 'Wing panel, stbd');
+    // DXF reference, TEXT: 72 = 1 is centre, 73 = 2 is middle, and 11/21 is then the point it stands on.
+    expect(found).toMatchObject({ halign: 1, valign: 2 });
+    const end = found && 'endPoint' in found ? found.endPoint : null;
+    expect(end).toMatchObject({ x: expect.closeTo(wing?.at[0] ?? NaN, 3), y: expect.closeTo(wing?.at[1] ?? NaN, 3) });
+  });
+
+  it('list the key beside the sheet', () => {
+    const parts = [makePart('tab', rectangle(14, 9), { name: 'A tab with a long name' })];
+    const [drawing] = draw(parts, layOut(parts, stock, LAYOUT_DEFAULTS));
+    if (!drawing) throw new Error('nothing was drawn');
+    const entities = new DxfParser().parseSync(writeDxf(drawing))?.entities ?? [];
+    const row = entities.find((entity) => 'text' in entity && String(entity.text).startsWith('K1 = A tab'));
+    const start = row && 'startPoint' in row ? row.startPoint : null;
+    expect(start).toMatchObject({ x: drawing.sheetMm[0] + 10 });
+    expect(writeSvg(drawing, svgPage())).toContain('<desc>K1 = A tab with a long name: upper face up</desc>');
+  });
+});
+
 /** Start tags of an SVG text with their attributes; enough for a file without comments, as is checked. */
 const tagsOf = (svg: string): { name: string; attributes: Map<string, string> }[] =>
   [...svg.matchAll(/<([a-z][a-zA-Z]*)((?:\s+[\w:-]+="[^"<]*")*)\s*\/?>/g)].map(([, name = '', rest = '']) => ({

@@ -115,6 +115,13 @@ describe('pages as they are read', () => {
     }
   });
 
+  it('the second page holds the card outline, how to join, and lengths to measure', () => {
+    const text = textOf(pdf, 2);
+    for (const words of ['85.60 × 53.98 mm', 'overlap by 10 mm', 'Measure after joining', 'should read']) {
+      expect(text).toContain(words);
+    }
+  });
+
   it('letters leave ink: a page is darker in its foot than in the strip that nothing stands in', () => {
     const picture = render(pdf, 2);
     const mm = 50 / 25.4;

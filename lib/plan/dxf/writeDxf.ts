@@ -1,4 +1,13 @@
-import { Colors, DxfWriter, LWPolylineFlags, point2d, point3d, Units } from '@tarikjabiri/dxf';
+import {
+  Colors,
+  DxfWriter,
+  LWPolylineFlags,
+  point2d,
+  point3d,
+  TextHorizontalAlignment,
+  TextVerticalAlignment,
+  Units,
+} from '@tarikjabiri/dxf';
 import { LINE_TYPE_KINDS, type LineTypeKind } from '@/lib/look/lineTypes';
 import type { Drawing } from '../drawing';
 
@@ -20,6 +29,11 @@ export const LAYERS: Readonly<Record<LineTypeKind, string>> = {
   check: 'TEST_SQUARE',
 };
 const TEXT_LAYER = 'NAMES';
+const ALIGNMENT = {
+  left: TextHorizontalAlignment.Left,
+  centre: TextHorizontalAlignment.Center,
+  right: TextHorizontalAlignment.Right,
+} as const;
 
 /** A DXF text is one line; a caret would begin a control code and a percent pair a symbol, so neither passes. */
 const plainText = (text: string): string => text.replaceAll(/[\p{Cc}^]/gu, ' ').replaceAll('%%', '%');
@@ -39,10 +53,15 @@ export function writeDxf(drawing: Drawing): string {
     const flags = closed ? LWPolylineFlags.Closed : LWPolylineFlags.None;
     dxf.addLWPolyline(vertices, { flags, layerName: LAYERS[type] });
   }
-  for (const { at, text, heightMm, angleDeg } of drawing.texts) {
-    dxf.addText(point3d(round(at[0]), round(at[1])), round(heightMm), plainText(text), {
+  for (const { at, text, heightMm, angleDeg, align } of drawing.texts) {
+    const place = point3d(round(at[0]), round(at[1]));
+    dxf.addText(place, round(heightMm), plainText(text), {
       layerName: TEXT_LAYER,
       rotation: round(angleDeg),
+      horizontalAlignment: ALIGNMENT[align],
+      verticalAlignment: TextVerticalAlignment.Middle,
+      // A text that is not aligned at its left foot stands on its second point.
+      secondAlignmentPoint: place,
     });
   }
   // The key stands beside the sheet, where no cutter goes.

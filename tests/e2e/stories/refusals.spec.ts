@@ -21,9 +21,9 @@ import { expect, test } from '../support/test';
 
 // What is refused, and what a person is told then: at the field, in words, and nothing is lost.
 
-const SPAN = 'Span of Wing';
-const ROOT = 'Root chord of Wing, panel p1';
-const TIP = 'Tip chord of Wing, panel p1';
+const SPAN = 'Span, wing';
+const ROOT = 'Root chord, wing';
+const TIP = 'Tip chord, wing';
 
 /** The field is marked as wrong and its description says why. */
 async function expectRefused(wrong: Locator, why: string | RegExp): Promise<void> {
@@ -140,7 +140,7 @@ test.describe('numbers on the board', () => {
     { label: ROOT, typed: '4000', says: 'the largest sheet of', keeps: '190' },
     { label: SPAN, typed: '10000', says: 'this sheet holds its shape up to', keeps: '700' },
     {
-      label: 'Outer end of aileron on Wing',
+      label: 'Outer end of aileron, wing',
       typed: '40',
       says: 'the shortest that can be cut and hinged',
       keeps: '94',
@@ -173,10 +173,10 @@ test.describe('numbers on the board', () => {
     await startDesign(page, /^Twin-boom pusher/, freshName('Knot'));
     await expectWorkedOut(page);
     const drawing = page.getByRole('region', { name: sheet.region, exact: true });
-    await drag(page, handle(page, 'Outer end of aileron on Wing'), [0, 400]);
+    await drag(page, handle(page, 'Outer end of aileron, wing'), [0, 400]);
     const why = drawing.getByRole('status').filter({ hasText: 'the shortest that can be cut and hinged' });
     await expect(why).toBeVisible();
-    expect(await typedNumber(page, 'Outer end of aileron on Wing')).toBeGreaterThan(50);
+    expect(await typedNumber(page, 'Outer end of aileron, wing')).toBeGreaterThan(50);
   });
 });
 
@@ -245,7 +245,7 @@ for (const { who, mayPrint } of [
     await expect(button(page, header.undo)).toHaveCount(0);
     await expect(page.getByRole('link', { name: header.release, exact: true })).toHaveCount(0);
     await expect(page.getByRole('link', { name: header.print, exact: true })).toHaveCount(mayPrint ? 1 : 0);
-    const span = page.getByRole('textbox', { name: /^Span of / });
+    const span = page.getByRole('textbox', { name: /^Span, / });
     const before = await span.inputValue();
     expect(Number(before)).toBe(620);
     await expect(span).not.toBeEditable();

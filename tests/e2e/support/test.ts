@@ -13,7 +13,8 @@ export interface Complaints {
 function listen(page: Page, into: string[]): void {
   page.on('console', (message: ConsoleMessage) => {
     const text = message.text();
-    if (message.type() === 'error' || /content security policy/i.test(text)) into.push(`${page.url()}: ${text}`);
+    if (message.type() === 'error' || /content security policy/i.test(text))
+      into.push(`${page.url()}: ${text} (${message.location().url})`);
   });
   page.on('pageerror', (error) => into.push(`${page.url()}: ${error.message}`));
 }
