@@ -64,6 +64,13 @@ describe('flatSurface', () => {
     expect(sections[0]?.incidenceRad).toBeCloseTo((6 * Math.PI) / 180, 12);
   });
 
+  it('lays a swept plate set at an incidence level: the angle is no anhedral', () => {
+    const panels = [panel({ lengthMm: 400, rootChordMm: 200, tipChordMm: 120, sweepDeg: 45 })];
+    const { sections } = flat(airframe({ surfaces: [rootAt(0, { incidenceDeg: 6, panels })] }));
+    expect(sections[1]?.le[0]).toBeCloseTo(50 + 400 - 30, 9);
+    expect(sections[1]?.le[2]).toBeCloseTo(0, 9);
+  });
+
   it('keeps a step in chord as two sections at one place', () => {
     const panels = [
       panel({ id: 'p1', lengthMm: 100, rootChordMm: 200, tipChordMm: 200 }),

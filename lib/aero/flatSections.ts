@@ -1,6 +1,6 @@
 import type { ResolvedAirframe, ResolvedSurface, Section } from '@/lib/airframe/resolved';
 import type { Airframe } from '@/lib/airframe/schema/airframe';
-import { lerp3, radFromDeg } from '@/lib/numerics/vec';
+import { add3, lerp3, radFromDeg, type Vec3 } from '@/lib/numerics/vec';
 import { bodyHalfWidthMm } from './bodyWidth';
 import type { LatticeSection } from './lattice/types';
 
@@ -27,11 +27,16 @@ export function flatSurface(
   { surface, panels, lengthMm }: ResolvedSurface,
 ): FlatSurface {
   const sections: LatticeSection[] = [];
-  for (const { root, tip } of panels) {
-    const flat = flatSection(root);
+  const start = panels[0]?.root;
+  let quarter: Vec3 = start ? lerp3(start.le, start.te, 0.25) : [0, 0, 0];
+  for (const { panel, root, tip, rollDeg } of panels) {
+    const flat = flatSection(quarter, root);
     const before = sections.at(-1);
     if (!before || before.chord !== flat.chord || before.incidenceRad !== flat.incidenceRad) sections.push(flat);
-    sections.push(flatSection(tip));
+    const roll = radFromDeg(rollDeg);
+    const aft = panel.lengthMm * Math.tan(radFromDeg(panel.sweepDeg));
+    quarter = add3(quarter, [aft, panel.lengthMm * Math.cos(roll), panel.lengthMm * Math.sin(roll)]);
+    sections.push(flatSection(quarter, tip));
   }
   const first = sections[0];
   const lies = Math.abs(panels[0]?.rollDeg ?? 0) < 45;
@@ -43,7 +48,7 @@ export function flatSurface(
   return { sections: [centre, ...sections], carriedMm: y, lengthMm: lengthMm + y };
 }
 
-function flatSection({ le, te, chordMm, incidenceDeg }: Section): LatticeSection {
-  const [x, y, z] = lerp3(le, te, 0.25);
+/** A section along x about its quarter point. That is where the plate has it before incidence turns it: the angle is kept apart. */
+function flatSection([x, y, z]: Vec3, { chordMm, incidenceDeg }: Section): LatticeSection {
   return { le: [x - chordMm / 4, y, z], chord: chordMm, incidenceRad: radFromDeg(incidenceDeg) };
 }

@@ -82,6 +82,84 @@ describe('side and front', () => {
   });
 });
 
+describe('tips and cutouts', () => {
+  const wing = (rest: Partial<Airframe['surfaces'][number]>): Airframe => ({
+    ...pusher,
+    surfaces: pusher.surfaces.map((one) => (one.id === 'wing' ? { ...one, ...rest } : one)),
+  });
+  const whole = (350 * (190 + 150)) / 2;
+  const area = (airframe: Airframe) =>
+    Math.abs(signedArea(of(planOutlines(airframe), 'wing', 'stbd')[0]?.points ?? []));
+  // The wing's leading edge runs aft by 10 mm in 350, its trailing edge forward by 30 mm.
+  const lean = { le: Math.atan2(10, 350), te: Math.atan2(30, 350) };
+
+  it('rounds a tip: each corner loses what lies between two tangents and their arc', () => {
+    const r = 40;
+    const lost = [Math.PI / 2 + lean.le, Math.PI / 2 + lean.te].map((corner) => {
+      const sweep = Math.PI - corner;
+      return r * r * (Math.tan(sweep / 2) - sweep / 2);
+    });
+    const rounded = wing({ tip: { shape: 'rounded', radiusMm: r } });
+    expect(area(rounded) / (whole - (lost[0] ?? 0) - (lost[1] ?? 0))).toBeCloseTo(1, 3);
+    const { maxY } = box(of(planOutlines(rounded), 'wing'));
+    expect(maxY).toBeCloseTo(350, 9);
+  });
+  it('rakes a tip about its trailing edge: the leading edge ends inboard', () => {
+    const raked = wing({ tip: { shape: 'raked', angleDeg: 20 } });
+    const ring = of(planOutlines(raked), 'wing', 'stbd')[0]?.points ?? [];
+    // From the tip's trailing edge (160, 350), in by tan 20 for each mm forward, until the leading edge.
+    const t = Math.tan((20 * Math.PI) / 180);
+    const x = (10 - (10 / 350) * t * 160) / (1 - (10 / 350) * t);
+    expect(ring.some((p) => Math.hypot(p[0] - x, p[1] - (350 - t * (160 - x))) < 1e-6)).toBe(true);
+    expect(ring.some((p) => Math.hypot(p[0] - 160, p[1] - 350) < 1e-6)).toBe(true);
+    expect(ring.some((p) => Math.hypot(p[0] - 10, p[1] - 350) < 1e-6)).toBe(false);
+  });
+  it('draws a tip that does not fit square, as it is cut', () => {
+    expect(area(wing({ tip: { shape: 'rounded', radiusMm: 300 } }))).toBeCloseTo(whole, 6);
+  });
+  it('takes a notch out of the edge it reaches', () => {
+    const notched = wing({
+      controls: [],
+      cutouts: [
+        {
+          id: 'slot',
+          outline: [
+            [0.2, 0.8],
+            [0.4, 0.8],
+            [0.4, 1],
+            [0.2, 1],
+          ],
+        },
+      ],
+    });
+    // Between stations 0.2 and 0.4 the mean chord is 178 mm, of it a fifth, along 70 mm.
+    expect(area(notched)).toBeCloseTo(whole - 70 * 178 * 0.2, 0);
+    expect(of(planOutlines(notched), 'wing', 'port')).toHaveLength(1);
+  });
+  it('draws a hole as a line inside the wing, on both sides', () => {
+    const holed = wing({
+      controls: [],
+      cutouts: [
+        {
+          id: 'hatch',
+          outline: [
+            [0.2, 0.3],
+            [0.4, 0.3],
+            [0.4, 0.5],
+            [0.2, 0.5],
+          ],
+        },
+      ],
+    });
+    for (const side of ['stbd', 'port']) {
+      const [ring, hole] = of(planOutlines(holed), 'wing', side);
+      expect(Math.abs(signedArea(ring?.points ?? []))).toBeCloseTo(whole, 3);
+      expect(hole?.closed).toBe(false);
+      expect(Math.abs(signedArea(hole?.points.slice(1) ?? []))).toBeCloseTo(70 * 178 * 0.2, 0);
+    }
+  });
+});
+
 describe('every layout in every view', () => {
   const fixture = parseAirframe(v1);
   const all: Airframe[] = [

@@ -58,6 +58,25 @@ describe('sections', () => {
     expect(te[2]).toBeLessThan(0);
     near([le[0] * 0.75 + te[0] * 0.25, 0, le[2] * 0.75 + te[2] * 0.25], [50, 0, 0]);
   });
+  it('turns a swept plate as one flat piece: both halves lie in the plane that the root chord and the span give', () => {
+    const swept = [
+      panel({ id: 'a', lengthMm: 310, rootChordMm: 200, tipChordMm: 120, sweepDeg: 5 }),
+      panel({ id: 'b', lengthMm: 90, rootChordMm: 120, tipChordMm: 60, sweepDeg: 45 }),
+    ];
+    const i = (6 * Math.PI) / 180;
+    const s = surface(withWing({ incidenceDeg: 6, panels: swept }));
+    // The plane through the root's quarter point (50, 0, 0) that falls aft by sin 6 degrees holds the port half too: y is not in it.
+    for (const station of [0, 0.3, 0.775, 0.9, 1])
+      for (const share of [0, 0.25, 1]) {
+        const [x, , z] = pointAt(s, station, share);
+        expect((x - 50) * Math.sin(i) + z * Math.cos(i)).toBeCloseTo(0, 9);
+      }
+    // Laid flat, the quarter chord still sweeps by length times tangent.
+    const [x, y, z] = pointAt(s, 1, 0.25);
+    const run = 310 * Math.tan((5 * Math.PI) / 180) + 90;
+    expect(Math.hypot(x - 50, z)).toBeCloseTo(run, 9);
+    expect(y).toBeCloseTo(400, 9);
+  });
   it('turns an upright fin with incidence so that its trailing edge goes to starboard', () => {
     const s = surface(withWing({ cantDeg: 90, incidenceDeg: 5, panels: [panel({ lengthMm: 100 })] }));
     const { le, te } = sectionAt(s, 0);

@@ -1,10 +1,12 @@
-import { add3, degFromRad, length3, lerp3, radFromDeg, sub3, type Vec3 } from '@/lib/numerics/vec';
+import { add3, degFromRad, length3, lerp3, radFromDeg, scale3, sub3, type Vec3 } from '@/lib/numerics/vec';
 import type { ResolvedPanel, ResolvedSurface, Section } from './resolved';
 import type { Surface } from './schema/surface';
 
 // A surface as chordwise sections in the aircraft's axes (x aft, y to starboard, z up; mm). The quarter-chord line runs from
-// panel to panel; incidence and washout turn each section about its own quarter-chord point; between the two ends of a
-// panel the surface is ruled, as a sheet is, so its leading and trailing edges are straight.
+// panel to panel. Incidence turns the surface as the flat plate it is cut from, about its root's quarter-chord point: a swept
+// quarter-chord line follows the plate's own chord, so that both halves of a wing without dihedral stay in one plane. Washout
+// turns each section about its own quarter-chord point; between the two ends of a panel the surface is ruled, as a sheet is,
+// so its leading and trailing edges are straight.
 
 /** Unit vector from leading to trailing edge at an incidence (positive leading edge up) and a roll (0 flat, 90 upright). */
 export function chordDirection(incidenceDeg: number, rollDeg: number): Vec3 {
@@ -38,11 +40,11 @@ export function panelled(surface: Surface, index: number, mount: Vec3): Resolved
     const rollDeg = surface.cantDeg + panel.dihedralDeg;
     const r = radFromDeg(rollDeg);
     const root = sectionAbout(quarter, panel.rootChordMm, incidenceDeg, rollDeg, run, run / whole);
-    quarter = add3(quarter, [
+    const aft = scale3(
+      chordDirection(surface.incidenceDeg, rollDeg),
       panel.lengthMm * Math.tan(radFromDeg(panel.sweepDeg)),
-      panel.lengthMm * Math.cos(r),
-      panel.lengthMm * Math.sin(r),
-    ]);
+    );
+    quarter = add3(add3(quarter, aft), [0, panel.lengthMm * Math.cos(r), panel.lengthMm * Math.sin(r)]);
     run += panel.lengthMm;
     incidenceDeg -= panel.washoutDeg;
     const last = panelIndex === surface.panels.length - 1;

@@ -224,6 +224,21 @@ describe('mass list', () => {
     ]);
     expect(new Set(lines.map(({ key }) => key)).size).toBe(lines.length);
   });
+  it('calls things by their kind, never by an id', () => {
+    const bare: Airframe = {
+      ...base,
+      surfaces: base.surfaces.map(({ name: _, ...one }) => one),
+      booms: base.booms.map(({ name: _, ...one }) => one),
+      items: base.items.map(({ name: _, ...one }) => one),
+      drives: base.drives.map(({ name: _, ...one }) => one),
+    };
+    const names = list(develop(bare), bare).map(({ name }) => name);
+    expect(names).toEqual(expect.arrayContaining(['Servo 1', 'Controller', 'Motor, propeller', 'Boom, starboard']));
+    expect(names).toContain('Wing, spar, port');
+    expect(names).toContain('Pod, firewall');
+    expect(new Set(names).size).toBe(names.length);
+    for (const name of names) expect(name).not.toMatch(/servo-|\besc\b|\brx\b|(\b\w+\b) \1$/);
+  });
   it('refuses parts of another airframe by name', () => {
     expect(() => list({ parts: [part('a', { materialId: 'cork' })] })).toThrow(/cork/);
     expect(() => list({ stockPieces: [piece('b', { tubeId: 'reed' })] })).toThrow(/reed/);

@@ -1,3 +1,4 @@
+import { elementName, namedElements } from '@/lib/airframe/names';
 import type { ResolvedAirframe, ResolvedSurface } from '@/lib/airframe/resolved';
 import type { Airframe } from '@/lib/airframe/schema/airframe';
 import type { Drive } from '@/lib/airframe/schema/equipment';
@@ -48,7 +49,7 @@ function coveringLines(airframe: Airframe, surfaces: readonly ResolvedSurface[])
       const massG = (2 * flat.areaMm2 * covering.arealMassGm2) / 1e6;
       const line: MassLine = {
         key: `${surface.id}/${panel.id}/covering`,
-        name: fill(texts.covering, { covering: covering.name, element: surface.name ?? surface.id }),
+        name: fill(texts.covering, { covering: covering.name, element: elementName(airframe, surface.id) }),
         group: 'covering',
         massG,
         at: flat.at,
@@ -88,15 +89,14 @@ function tubeLines(airframe: Airframe, development: Development): MassLine[] {
   });
 }
 
-function driveLines(drive: Drive, disc: Vec3): MassLine[] {
-  const name = drive.name ?? drive.id;
+function driveLines(drive: Drive, name: string, disc: Vec3): MassLine[] {
   const axis = thrustDirection(drive);
   const { motor } = drive;
   const turning = drive.kind === 'propeller' ? drive.propeller : drive.fan;
   const lines: MassLine[] = [
     {
       key: `${drive.id}/motor`,
-      name: fill(texts.motor, { drive: name }),
+      name: drive.kind === 'propeller' ? name : fill(texts.motor, { drive: name }),
       group: 'drive',
       massG: motor.massG,
       at: motorCentre(drive, disc),
@@ -104,7 +104,7 @@ function driveLines(drive: Drive, disc: Vec3): MassLine[] {
     },
     {
       key: `${drive.id}/${drive.kind === 'propeller' ? 'propeller' : 'fan'}`,
-      name: fill(drive.kind === 'propeller' ? texts.propeller : texts.fan, { drive: name }),
+      name: drive.kind === 'propeller' ? fill(texts.propeller, { drive: name }) : name,
       group: 'drive',
       massG: turning.massG,
       at: disc,
@@ -125,11 +125,13 @@ export function massList(airframe: Airframe, resolved: ResolvedAirframe, develop
     if (!place) throw new RangeError(`element ${id} has no place`);
     return place.at;
   };
+  const names = new Map(namedElements(airframe).map((element) => [element.id, element.name]));
+  const name = (id: string): string => names.get(id) ?? id;
   const foam = foamLines(airframe, development.parts);
   const items = airframe.items.map(
     (item): MassLine => ({
       key: item.id,
-      name: item.name ?? item.id,
+      name: name(item.id),
       group: 'item',
       massG: item.massG,
       at: at(item.id),
@@ -139,7 +141,7 @@ export function massList(airframe: Airframe, resolved: ResolvedAirframe, develop
   const gear = airframe.gear.flatMap((leg) => {
     const line: MassLine = {
       key: leg.id,
-      name: leg.id,
+      name: name(leg.id),
       group: 'gear',
       massG: leg.massG,
       at: at(leg.id),
@@ -154,7 +156,7 @@ export function massList(airframe: Airframe, resolved: ResolvedAirframe, develop
     ...tapeLines(airframe, development.parts),
     ...tubeLines(airframe, development),
     ...items,
-    ...airframe.drives.flatMap((drive) => driveLines(drive, at(drive.id))),
+    ...airframe.drives.flatMap((drive) => driveLines(drive, name(drive.id), at(drive.id))),
     ...gear,
   ];
 }

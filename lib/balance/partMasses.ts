@@ -122,10 +122,17 @@ export function glueLines(
         massG,
         spread: rodSpread(massG, from, to),
       };
+      const onSide = (side: 'stbd' | 'port') => fill(texts.side, { name: line.name, side: texts[side] });
       if (count !== 2) return [{ ...line, key: `${key}/glue`, at: middle }];
       return [
-        { ...line, key: `${key}/glue/stbd`, at: middle },
-        { ...line, key: `${key}/glue/port`, at: mirror3(middle), spread: rodSpread(massG, mirror3(from), mirror3(to)) },
+        { ...line, key: `${key}/glue/stbd`, name: onSide('stbd'), at: middle },
+        {
+          ...line,
+          key: `${key}/glue/port`,
+          name: onSide('port'),
+          at: mirror3(middle),
+          spread: rodSpread(massG, mirror3(from), mirror3(to)),
+        },
       ];
     });
   if (marked.length > 0 || foam.length === 0) return [...marked, ...tubes];

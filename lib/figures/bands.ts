@@ -69,5 +69,5 @@ export const PITCH_FEEL: VerdictBand = { good: [0.05, 0.6], watch: [0.02, 1.2], 
 export const ROLL_HELIX: VerdictBand = {
   good: [0.07, 0.35],
   watch: [0.04, 0.6],
-  source: 'lower bound: Gilruth, NACA TR 715 (1941), from memory; upper bound: common practice, no source',
+  source: 'lower bound: Gilruth & Turner, NACA TR 715 (1941), from memory; upper bound: common practice, no source',
 };

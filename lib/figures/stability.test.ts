@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import type { Airframe } from '@/lib/airframe/schema/airframe';
+import type { Surface } from '@/lib/airframe/schema/surface';
 import { airframe, control, panel, surface } from '@/tests/support/airframe';
 import { expectHonest, fin, full, neutralPoint, packAt, plain, tail, value, wing } from '@/tests/support/plainAircraft';
 import type { Figures } from './types';
@@ -148,5 +149,18 @@ describe('verdicts, one on each side of every limit', () => {
     const stubby = wing({ panels: [panel({ lengthMm: 150, rootChordMm: 300, tipChordMm: 200, sweepDeg: 20 })] });
     const flagged = full(plain({ surfaces: [stubby, tail(), fin()] })).values.neutralPointHandbookXMm;
     expect(flagged?.verdict?.level).toBe('watch');
+  });
+
+  it('the simple estimate is the point about which the lifts of wing and tail balance, however large the tail', () => {
+    // Wing 800 x 200, tail 400 x 100: both of aspect ratio 4, so slopes cancel. Quarter points at 50 and 600 + 25.
+    const oblong = (rest: Partial<Surface>, lengthMm: number, chord: number) => ({
+      ...rest,
+      panels: [panel({ lengthMm, rootChordMm: chord, tipChordMm: chord })],
+    });
+    const pair = plain({ surfaces: [wing(oblong({}, 400, 200)), tail(600, oblong({}, 200, 100))], bodies: [] });
+    const slope = (2 * Math.PI * 4) / (2 + Math.sqrt(20));
+    const share = 0.25 * (1 - (2 * slope) / (Math.PI * 4));
+    const byHand = (50 + share * 625) / (1 + share);
+    expect(full(pair).values.neutralPointHandbookXMm?.value).toBeCloseTo(byHand, 6);
   });
 });

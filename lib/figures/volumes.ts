@@ -66,8 +66,10 @@ export function tailVolumeV(surfaces: readonly SurfaceArea[], wing: WingReferenc
 }
 
 /**
- * Neutral point by hand, x in mm: h_n = h_ac + V_H (a_t / a_w)(1 - 2 a_w / (pi A)), arms from the wing's aerodynamic centre (Nelson,
- * "Flight Stability and Automatic Control", ch. 2; slopes by Lowry & Polhamus, NACA TN 3911). Null for a foreplane.
+ * Neutral point by hand, x in mm: h_n = h_ac + V_H (a_t / a)(1 - 2 a_w / (pi A)), V_H with the arm from the wing's aerodynamic
+ * centre, a the slope of wing and tail together, a_w (1 + (a_t / a_w)(S_t / S)(1 - 2 a_w / (pi A))) (Etkin & Reid, "Dynamics of
+ * Flight", ch. 2; Nelson, "Flight Stability and Automatic Control", ch. 2; slopes by Lowry & Polhamus, NACA TN 3911). Null for a
+ * foreplane.
  */
 export function handbookNeutralPointX(surfaces: readonly SurfaceArea[], wing: WingReference): number | null {
   if (surfaces.some(({ surface }) => surface.role === 'foreplane')) return null;
@@ -80,7 +82,8 @@ export function handbookNeutralPointX(surfaces: readonly SurfaceArea[], wing: Wi
   const tailSlope = wingLiftSlope(spanSquare / area, 0);
   const volume = (tail.areaMm2 * tail.armMm) / (wing.areaMm2 * wing.macMm);
   const share = (tailSlope / wingSlope) * (1 - (2 * wingSlope) / (Math.PI * wing.aspectRatio));
-  return wing.quarterXMm + wing.macMm * volume * share;
+  const wholeOverWing = 1 + (share * tail.areaMm2) / wing.areaMm2;
+  return wing.quarterXMm + (wing.macMm * volume * share) / wholeOverWing;
 }
 
 /** The simple estimate beside the lattice's, with a note when they are far apart. */

@@ -31,7 +31,7 @@ export function roundedTip(edges: Edges, radiusMm: number): Edges | null {
   const [le, te] = [edges.le.at(-1), edges.te.at(-1)];
   const innerLe = edges.le.at(-2);
   const innerTe = edges.te.at(-2);
-  if (!le || !te || !innerLe || !innerTe) return null;
+  if (!le || !te || !innerLe || !innerTe || distance(le, te) === 0) return null;
   const atLe = arcPoints(innerLe, le, te, radiusMm);
   const atTe = arcPoints(innerTe, te, le, radiusMm);
   const taken = atLe.tangentMm + atTe.tangentMm;

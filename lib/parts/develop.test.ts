@@ -345,3 +345,14 @@ describe('tips and turning surfaces', () => {
     expect(Math.max(...zs)).toBeCloseTo(20 * Math.sin((5 * Math.PI) / 180), 9);
   });
 });
+
+describe('a swept wing set at an incidence', () => {
+  it('is one flat sheet of both halves, with no joint on the centre line', () => {
+    const swept = panel({ lengthMm: 300, rootChordMm: 180, tipChordMm: 120, sweepDeg: 25 });
+    const document = airframe({ surfaces: [surface({ incidenceDeg: 6, panels: [swept] })] });
+    const { parts, problems } = develop(document);
+    expect(problems).toEqual([]);
+    expect(parts.map(({ key }) => key)).toEqual(['wing/p1/sheet/centre']);
+    expect(area(parts[0]?.outline ?? [])).toBeCloseTo(300 * (180 + 120), 6);
+  });
+});

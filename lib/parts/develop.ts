@@ -1,3 +1,4 @@
+import { elementName } from '@/lib/airframe/names';
 import { resolve } from '@/lib/airframe/resolve';
 import type { ResolvedAirframe } from '@/lib/airframe/resolved';
 import type { Airframe } from '@/lib/airframe/schema/airframe';
@@ -20,7 +21,7 @@ function boomPieces(booms: readonly BoomHere[], airframe: Airframe): { pieces: S
   const pieces = booms.map(
     ({ boom, resolved, tube }): StockPiece => ({
       key: `${boom.id}/tube`,
-      name: boom.name ?? fill(texts.names.boom, { boom: boom.id }),
+      name: elementName(airframe, boom.id),
       tubeId: tube.id,
       lengthMm: length3(sub3(resolved.aft, resolved.fore)),
       count: boom.mirrored ? 2 : 1,

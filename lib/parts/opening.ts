@@ -1,4 +1,4 @@
-import { differenceD, FillRule, type PathsD } from 'clipper2-ts';
+import { subtractRings } from '@/lib/geometry/clipping';
 import { contains, counterClockwise, edges, signedArea } from '@/lib/geometry/polygons';
 import type { Problem } from '@/lib/numerics/result';
 import type { Vec2 } from '@/lib/numerics/vec';
@@ -60,7 +60,7 @@ export function openRing(outline: Vec2[], openings: readonly Opening[]): Opened 
       holes = [...holes, ...touching.map((ring) => cleanRing(ring).reverse())];
       continue;
     }
-    const result = subtract([left, ...holes], touching);
+    const result = subtractRings([left, ...holes], touching).map(cleanRing);
     const [whole, ...more] = result.filter((ring) => signedArea(ring) > 0);
     if (!whole || more.length > 0) {
       problems.push({ code: 'opening-parts-sheet', path, message: texts.problems.openingPartsSheet });
@@ -70,19 +70,6 @@ export function openRing(outline: Vec2[], openings: readonly Opening[]): Opened 
     holes = result.filter((ring) => signedArea(ring) < 0);
   }
   return { outline: left, holes, problems };
-}
-
-/** Decimal places of the clipping, mm: 1e-6 mm is far below what any cutter follows and keeps the products in range. */
-const CLIP_PLACES = 6;
-
-function subtract(subject: readonly Ring[], clip: readonly Ring[]): Vec2[][] {
-  const toPaths = (rings: readonly Ring[]): PathsD => rings.map((ring) => ring.map(([x, y]) => ({ x, y })));
-  return differenceD(toPaths(subject), toPaths(clip), FillRule.NonZero, CLIP_PLACES).map((path) => {
-    const ring = path.map(({ x, y }): Vec2 => [x, y]);
-    const known = [...subject.flat(), ...clip.flat()];
-    // Clipping rounds to its own grid: corners that were given keep their exact place.
-    return cleanRing(ring.map((p) => known.find((q) => Math.hypot(p[0] - q[0], p[1] - q[1]) < 2e-6) ?? p));
-  });
 }
 
 /** A draft with its openings cut; what is worked on it ends where the sheet does. */

@@ -79,6 +79,7 @@ function lengthGrip(context: Context): Grip {
 function sweepGrip(context: Context): Grip {
   const { airframe, surface, panel, base } = context;
   const { sweepDeg, lengthMm } = panel.panel;
+  const incidence = radFromDeg(surface.surface.incidenceDeg);
   const limit = Math.max(MAX_SWEEP_DEG, Math.abs(sweepDeg));
   const stop = fill(texts.stops.sweepLimit, { min: mm(-limit), max: mm(limit) });
   return {
@@ -93,8 +94,8 @@ function sweepGrip(context: Context): Grip {
       step: 0.5,
       at: inPlan(lerp3(panel.tip.le, panel.tip.te, 0.5)),
       direction: AFT,
-      // x of the tip is length times tan(sweep); this is the slope of its inverse here.
-      perMm: degFromRad(Math.cos(radFromDeg(sweepDeg)) ** 2 / lengthMm),
+      // x of the tip is length times tan(sweep) along the plate's chord; this is the slope of its inverse here.
+      perMm: degFromRad(Math.cos(radFromDeg(sweepDeg)) ** 2 / lengthMm) / Math.cos(incidence),
     },
     atMin: stop,
     atMax: stop,

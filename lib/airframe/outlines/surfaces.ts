@@ -1,8 +1,11 @@
-import { signedArea } from '@/lib/geometry/polygons';
-import { add3, cross3, length3, scale3, sub3, type Vec3 } from '@/lib/numerics/vec';
+import { subtractRings } from '@/lib/geometry/clipping';
+import { counterClockwise, signedArea } from '@/lib/geometry/polygons';
+import { add3, cross3, length3, scale3, sub3, type Vec2, type Vec3 } from '@/lib/numerics/vec';
 import type { ResolvedControl, ResolvedPanel, ResolvedSurface } from '../resolved';
 import type { Airframe } from '../schema/airframe';
-import { onSides, project, type View, type ViewOutline } from './view';
+import { pointAt } from '../section';
+import { tippedPanel } from './tips';
+import { flatOnSides, onSides, project, type View, type ViewOutline } from './view';
 
 /** A panel that shows less of its face than this is seen edge on, and drawn as thick as its sheet. */
 const EDGE_ON_SHARE = 0.2;
@@ -34,22 +37,52 @@ const withThickness = (points: readonly Vec3[], panel: ResolvedPanel, thicknessM
 const thickness = (airframe: Airframe, panel: ResolvedPanel): number =>
   airframe.materials.find(({ id }) => id === panel.panel.materialId)?.thicknessMm ?? 0;
 
-/** A surface's outline with square tips: one line where its face is seen, a thick line per panel where it stands edge on. */
+/** A closed line of a surface's face in a view, with its cutouts: notches are part of it, holes are lines inside it. */
+function opened(view: View, ring: readonly Vec3[], resolved: ResolvedSurface): { closed: boolean; points: Vec2[] }[] {
+  const flat = ring.map((point) => project(view, point));
+  const cutouts = resolved.surface.cutouts.map(({ outline }) =>
+    counterClockwise(outline.map(([station, share]) => project(view, pointAt(resolved, station, share)))),
+  );
+  if (cutouts.length === 0) return [{ closed: true, points: flat }];
+  return subtractRings([counterClockwise(flat)], cutouts).map((points) => {
+    const [first] = points;
+    const hole = signedArea(points) < 0;
+    return hole && first ? { closed: false, points: [...points, first] } : { closed: true, points };
+  });
+}
+
+/**
+ * A surface's outline, its tip and its cutouts as they are cut: one line where its face is seen, a thick line per panel where it
+ * stands edge on. A tip shape that does not fit is drawn square, as it is cut.
+ */
 export function surfaceOutlines(view: View, resolved: ResolvedSurface, airframe: Airframe): ViewOutline[] {
   const { surface, panels } = resolved;
-  const base = { elementId: surface.id, key: surface.id, kind: 'surface', closed: true } as const;
+  const base = { elementId: surface.id, key: surface.id, kind: 'surface' } as const;
   if (panels.every((panel) => edgeOn(view, panel))) {
-    return panels.flatMap((panel) =>
-      onSides(base, surface.mirrored, view, withThickness(corners(panel), panel, thickness(airframe, panel)), true),
-    );
+    return panels.flatMap((panel, index) => {
+      const points = index === panels.length - 1 ? tippedPanel(panel, surface.tip).flat() : corners(panel);
+      const thick = withThickness(points, panel, thickness(airframe, panel));
+      return onSides({ ...base, closed: true }, surface.mirrored, view, thick, true);
+    });
   }
-  const leading = panels.flatMap(({ root, tip }) => [root.le, tip.le]);
-  const trailing = panels.flatMap(({ root, tip }) => [root.te, tip.te]).reverse();
-  const ring = [...leading, ...trailing].filter((point, index, all) => {
+  const edgesOf = (panel: ResolvedPanel): readonly [le: readonly Vec3[], te: readonly Vec3[]] =>
+    panel.index === panels.length - 1
+      ? tippedPanel(panel, surface.tip)
+      : [
+          [panel.root.le, panel.tip.le],
+          [panel.root.te, panel.tip.te],
+        ];
+  const ring = [
+    ...panels.flatMap((panel) => edgesOf(panel)[0]),
+    ...panels.flatMap((panel) => edgesOf(panel)[1]).reverse(),
+  ];
+  const distinct = ring.filter((point, index, all) => {
     const before = all[index - 1];
     return !before || length3(sub3(point, before)) > 1e-9;
   });
-  return onSides(base, surface.mirrored, view, ring);
+  return opened(view, distinct, resolved).flatMap(({ closed, points }) =>
+    flatOnSides({ ...base, closed }, surface.mirrored, view, points),
+  );
 }
 
 /** A control's outline from its hinge line to the trailing edge. */

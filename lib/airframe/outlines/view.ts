@@ -1,5 +1,5 @@
 import { convexHull } from '@/lib/geometry/hull';
-import { mirror3, type Vec2, type Vec3 } from '@/lib/numerics/vec';
+import type { Vec2, Vec3 } from '@/lib/numerics/vec';
 
 export type View = 'plan' | 'side' | 'front';
 export type OutlineKind = 'surface' | 'control' | 'body' | 'boom' | 'drive' | 'item' | 'gear';
@@ -33,11 +33,24 @@ export function onSides(
   points: readonly Vec3[],
   silhouette = false,
 ): ViewOutline[] {
-  const drawn = (side: OutlineSide, all: readonly Vec3[]): ViewOutline => {
-    const flat = all.map((point) => project(view, point));
-    return { ...base, side, points: silhouette ? convexHull(flat) : flat };
-  };
-  return mirrored ? [drawn('stbd', points), drawn('port', points.map(mirror3))] : [drawn('centre', points)];
+  const flat = points.map((point) => project(view, point));
+  return flatOnSides(base, mirrored, view, silhouette ? convexHull(flat) : flat);
+}
+
+/** As `onSides`, for a line that is in the view's axes already. From the side both halves lie on each other. */
+export function flatOnSides(
+  base: Omit<ViewOutline, 'side' | 'points'>,
+  mirrored: boolean,
+  view: View,
+  points: readonly Vec2[],
+): ViewOutline[] {
+  if (!mirrored) return [{ ...base, side: 'centre', points }];
+  const across = AXES[view].map((axis) => (axis === 1 ? -1 : 1));
+  const port = points.map(([x, y]): Vec2 => [x * (across[0] ?? 1), y * (across[1] ?? 1)]);
+  return [
+    { ...base, side: 'stbd', points },
+    { ...base, side: 'port', points: port },
+  ];
 }
 
 /** The eight corners of a box about its centre, edges along the given half-vectors. */

@@ -102,6 +102,14 @@ interface FormerPlace {
   readonly inside: Inside;
 }
 
+/** Formers go by their id, as frames do on a plan; firewalls by number where there are several. */
+function formerName({ body, bodyName }: FormerPlace, former: Body['formers'][number]): string {
+  if (former.role !== 'firewall') return fill(texts.names.former, { body: bodyName, id: former.id });
+  const firewalls = body.formers.filter(({ role }) => role === 'firewall');
+  const values = { body: bodyName, number: firewalls.indexOf(former) + 1 };
+  return fill(firewalls.length > 1 ? texts.names.firewallOf : texts.names.firewall, values);
+}
+
 /** One former or firewall of a box body. Its outer face looks forward. */
 export function formerDraft(
   former: Body['formers'][number],
@@ -134,11 +142,10 @@ export function formerDraft(
   }
   const flat = (points: readonly Vec3[]): Vec2[] => points.map((p) => toPart(local, p));
   const { outline, operations } = bevelled(flat(front), flat(aft), material.thicknessMm);
-  const name = former.role === 'firewall' ? texts.names.firewall : texts.names.former;
   return {
     draft: {
       key: `${body.id}/${former.id}/${former.role}`,
-      name: () => fill(name, { body: place.bodyName, id: former.id }),
+      name: () => formerName(place, former),
       elementId: former.id,
       material,
       outline,

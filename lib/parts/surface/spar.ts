@@ -98,7 +98,7 @@ function sparOn(run: Run, ring: Ring, spar: Spar, tube: Tube | undefined, path: 
   const { id, mirrored } = run.surface.surface;
   const piece: StockPiece = {
     key: `${id}/${spar.id}/tube`,
-    name: fill(texts.names.spar, { surface: surfaceName(run.surface.surface), spar: spar.id }),
+    name: sparName(run.surface.surface, spar),
     tubeId: tube.id,
     lengthMm,
     count: mirrored && !across ? 2 : 1,
@@ -113,6 +113,12 @@ export function tooLong(tube: Tube, lengthMm: number, path: string): Problem[] {
   if (lengthMm <= tube.stockLengthMm) return [];
   const message = fill(texts.problems.tubeTooShort, { length: mm(lengthMm), stock: mm(tube.stockLengthMm) });
   return [{ code: 'tube-too-short', path, message, fix: texts.problems.tubeTooShortFix }];
+}
+
+/** How a spar is called: by its surface, and by its number where there are several. */
+function sparName(surface: Surface, spar: Spar): string {
+  const values = { surface: surfaceName(surface), number: surface.spars.indexOf(spar) + 1 };
+  return fill(surface.spars.length > 1 ? texts.names.sparOf : texts.names.spar, values);
 }
 
 /** How a surface is called on a part: its own name, or its role. */

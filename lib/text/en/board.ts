@@ -1,6 +1,6 @@
 // Texts of the building board: sheet, handles, slip, rule, figures, saving.
 
-export const board = { title: 'Building board', fetching: 'Fetching…' } as const;
+export const board = { title: 'Building board' } as const;
 
 export const sheet = {
   region: 'Drafting sheet',

@@ -54,8 +54,10 @@ export const figureTexts = {
   neutralPointHandbookXMm: {
     name: 'Neutral point, simple estimate',
     explanation: 'A check on the lattice by the tail-volume formula that can be worked by hand.',
-    method: 'Quarter MAC plus tail volume times the ratio of lift slopes, less the downwash 2 CL / (pi A) of the wing.',
-    source: 'Nelson, Flight Stability and Automatic Control, ch. 2; slopes: Lowry & Polhamus, NACA TN 3911 (1957).',
+    method:
+      "Quarter MAC plus tail volume times the tail's lift slope over the whole aircraft's, less the downwash 2 CL / (pi A) of the wing.",
+    source:
+      'Etkin & Reid, Dynamics of Flight, ch. 2; Nelson, Flight Stability and Automatic Control, ch. 2; slopes: Lowry & Polhamus, NACA TN 3911 (1957).',
     limits: 'For a tail well behind a wing of moderate sweep; not for foreplanes.',
   },
   cgXMm: {
@@ -171,8 +173,9 @@ export const figureTexts = {
     name: 'Helix angle at full aileron',
     explanation:
       'How steep a screw the wing tip flies at full throw: roll rate made comparable between sizes and speeds.',
-    method: 'Roll rate times span over twice the speed, elevons with what pitch leaves.',
-    source: 'Lower bound 0.07: Gilruth, NACA TR 715 (1941), from memory; upper bound common practice, no source.',
+    method: 'Roll rate times span over twice the speed, with the stick fully over and pitch at rest.',
+    source:
+      'Lower bound 0.07: Gilruth & Turner, NACA TR 715 (1941), from memory; upper bound common practice, no source.',
     limits: LATTICE_LIMITS,
   },
   pitchInertiaKgM2: {

@@ -268,7 +268,7 @@ test('another workshop is as if it were not there, whatever the address', async 
   const stranger = await openAs('Marguerite Adeyemi');
   await expect(stranger.getByRole('link', { name: new RegExp(name) })).toHaveCount(0);
   const nowhere = '/w/00000000-0000-4000-8000-000000000000';
-  for (const path of [address, `${address}/members`, nowhere, '/w/not-an-id', `${address}/d/not-an-id/r/1`]) {
+  for (const path of [address, `${address}/members`, nowhere, '/w/not-an-id', `${address}/d/x`, `${address}/d/x/r/1`]) {
     complaints.expectOne(/404/);
     const answer = await stranger.goto(path);
     expect(answer?.status(), path).toBe(404);
