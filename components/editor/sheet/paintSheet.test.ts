@@ -36,7 +36,7 @@ interface Call {
 }
 
 /** Writes down every call with its arguments instead of drawing. */
-function recordingPen() {
+function notingPen() {
   const calls: Call[] = [];
   const note =
     (name: string) =>
@@ -97,7 +97,7 @@ describe('paintSheet', () => {
   it.each(['tarrel-620', 'ombry-1000', 'quenlet-700', 'quenlet-1050', 'hask'])(
     'draws %s with finite numbers only',
     (name) => {
-      const { pen, calls } = recordingPen();
+      const { pen, calls } = notingPen();
       paintSheet(pen, pictureOf(example(name)));
       const numbers = calls.flatMap(({ args }) => args.filter((arg) => typeof arg === 'number'));
       expect(numbers.length).toBeGreaterThan(500);
@@ -106,10 +106,10 @@ describe('paintSheet', () => {
   );
 
   it('says CG, range and neutral point in numbers, and leaves out what is not known', () => {
-    const known = recordingPen();
+    const known = notingPen();
     paintSheet(known.pen, pictureOf(example('tarrel-620')));
     expect(texts(known.calls)).toEqual(expect.arrayContaining(['CG 58', 'range 52…61', 'NP 81']));
-    const unknown = recordingPen();
+    const unknown = notingPen();
     paintSheet(unknown.pen, pictureOf(example('tarrel-620'), { marks: null, cg: null }));
     expect(
       texts(unknown.calls).filter((text) => String(text).startsWith('CG') || String(text).startsWith('NP')),
@@ -119,7 +119,7 @@ describe('paintSheet', () => {
   it('draws the wing’s corner where the transform puts it', () => {
     const airframe = example('tarrel-620');
     const picture = pictureOf(airframe);
-    const { pen, calls } = recordingPen();
+    const { pen, calls } = notingPen();
     paintSheet(pen, picture);
     const wing = picture.scene.plan.find(({ elementId, kind }) => elementId === 'wing' && kind === 'surface');
     const corner = wing?.points[0];
