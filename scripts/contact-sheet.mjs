@@ -2,8 +2,8 @@
 //
 //   node scripts/contact-sheet.mjs http://127.0.0.1:3000 SIGNINS-FILE [--out contact-sheet] [--widths 390,1440] [--schemes light,dark]
 //
-// SIGNINS-FILE holds one person a line: an email and, behind it, a password. The server must be running. Pages are found by following
-// links; one of each kind is kept. Exit 1 when a page overflows sideways, breaks, or writes an error to the console.
+// SIGNINS-FILE is the one in the data folder: name, address, password and roles, parted by tabs. The server must be running.
+// Pages are found by following links; one of each kind is kept. Exit 1 when a page overflows sideways, breaks, or writes an error to the console.
 import { mkdirSync, readFileSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 import { pathToFileURL } from 'node:url';
@@ -46,9 +46,10 @@ const schemes = options.schemes.split(',');
 /** People of the file, by the local part of their address; nobody first. */
 function people() {
   const lines = signInsFile === undefined ? [] : readFileSync(signInsFile, 'utf8').split('\n');
+  // Name, address, password and roles, as the start script writes them.
   const found = lines.flatMap((line) => {
-    const match = /([^\s"',:]+@[^\s"',:]+)["',:\s]+(?:\S*["':\s]+)?([^\s"',]+)["',}\s]*$/.exec(line);
-    return match === null ? [] : [{ name: match[1].split('@')[0], email: match[1], password: match[2] }];
+    const [, email, password] = line.split('\t');
+    return password === undefined ? [] : [{ name: email.split('@')[0], email, password }];
   });
   return [{ name: 'nobody' }, ...found];
 }
@@ -63,6 +64,14 @@ async function signIn(page, { email, password }) {
   await page.locator('input[name=password]').fill(password);
   await page.locator('button[type=submit]').click();
   await page.waitForURL((url) => url.pathname !== '/sign-in');
+}
+
+/** Until the board is drawn and its figures stand, where the page holds one; a picture of an empty film says nothing. */
+async function settled(page) {
+  await page.waitForLoadState('networkidle');
+  await page.locator('.film [role=status]').waitFor({ state: 'detached' });
+  const mass = page.getByTestId('figure-allUpMassG');
+  if ((await mass.count()) > 0) await mass.filter({ hasText: /\d/ }).waitFor();
 }
 
 /** Addresses on this site that the page links to, without files of the API. */
@@ -96,6 +105,7 @@ async function picture(page, address, file) {
   page.on('pageerror', onError);
   const response = await page.goto(origin + address, { waitUntil: 'load' });
   await page.evaluate(() => document.fonts.ready);
+  await settled(page);
   const over = await page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth);
   if (over > 0) faults.push(`overflows sideways by ${over} px`);
   const status = response?.status() ?? 0;
