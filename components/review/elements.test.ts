@@ -8,6 +8,10 @@ if (!parsed.ok) throw new RangeError(`the example does not open: ${parsed.proble
 const list = elementList(parsed.value);
 
 describe('elementList', () => {
+  it('calls things by the names that the board gives them, never by an id', () => {
+    expect(elementName(list, 'servo-ele')).toBe('Servo 3');
+    expect(elementName(list, 'pod')).toBe('Body');
+  });
   it('names controls by the surface that carries them', () => {
     expect(elementName(list, 'wing/aileron')).toBe('aileron of the wing');
     expect(elementName(list, 'tail/elevator')).toBe('elevator of the tailplane');

@@ -1,5 +1,6 @@
+import { controlWithin, namedElements } from '@/lib/airframe/names';
 import type { Airframe } from '@/lib/airframe/schema/airframe';
-import { elements as words } from '@/lib/text/en/review';
+import { controlOn } from '@/lib/text/en/review';
 import { fill } from '@/lib/text/fill';
 
 export interface NamedElement {
@@ -7,36 +8,17 @@ export interface NamedElement {
   readonly name: string;
 }
 
-const named = (id: string, own: string | undefined, what: string): NamedElement => ({ id, name: own ?? what });
-
-/** Two servos or two fins read alike; their ids then tell them apart. */
-function toldApart(list: readonly NamedElement[]): readonly NamedElement[] {
-  const times = new Map<string, number>();
-  for (const { name } of list) times.set(name, (times.get(name) ?? 0) + 1);
-  return list.map(({ id, name }) => ({
-    id,
-    name: (times.get(name) ?? 0) > 1 ? fill(words.withId, { what: name, id }) : name,
-  }));
-}
-
-/** Everything on the aircraft that a comment can be about, in building order, each with a name to read. */
+/** Everything on the aircraft that a comment can be about, in building order, named as on the board; a control follows its surface. */
 export function elementList(airframe: Airframe): readonly NamedElement[] {
-  const surfaces = airframe.surfaces.flatMap((surface) => {
-    const own = named(surface.id, surface.name, words[surface.role]);
-    const controls = surface.controls.map((control) => ({
-      id: `${surface.id}/${control.id}`,
-      name: fill(words.on, { what: words[control.kind], parent: own.name }),
+  const surfaces = new Map(airframe.surfaces.map((surface) => [surface.id, surface]));
+  return namedElements(airframe).flatMap(({ id, name, within }) => {
+    const surface = surfaces.get(id);
+    const controls = surface?.controls.map((control) => ({
+      id: `${id}/${control.id}`,
+      name: fill(controlOn, { what: controlWithin(surface, control), parent: within }),
     }));
-    return [own, ...controls];
+    return [{ id, name }, ...(controls ?? [])];
   });
-  return toldApart([
-    ...surfaces,
-    ...airframe.bodies.map((body) => named(body.id, body.name, words[body.kind])),
-    ...airframe.booms.map((boom) => named(boom.id, boom.name, words.boom)),
-    ...airframe.drives.map((drive) => named(drive.id, drive.name, words[drive.kind])),
-    ...airframe.items.map((item) => named(item.id, item.name, words[item.kind])),
-    ...airframe.gear.map((gear) => named(gear.id, undefined, words[gear.kind])),
-  ]);
 }
 
 /** The name of an element by its key; the key itself when nothing has it. */

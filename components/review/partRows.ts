@@ -1,6 +1,6 @@
 import type { Airframe } from '@/lib/airframe/schema/airframe';
 import type { Part, StockPiece } from '@/lib/parts/types';
-import { materials as words } from '@/lib/text/en/review';
+import { materials as words } from '@/lib/text/en/elements';
 import { fixedDigits, trimmedDigits } from '@/lib/units/number';
 import type { PartRow, StockRow } from './PartsTable';
 

@@ -1,7 +1,7 @@
 import type { ReactNode } from 'react';
 
 /** One hand, one weight: 16 px, square ends, drawn here. */
-function Icon({ children, className = '' }: { readonly children: ReactNode; readonly className?: string }) {
+export function Icon({ children, className = '' }: { readonly children: ReactNode; readonly className?: string }) {
   return (
     <svg
       viewBox="0 0 16 16"

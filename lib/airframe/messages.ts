@@ -63,8 +63,8 @@ const EXPECTED: Readonly<Record<string, string>> = {
   boolean: 'true or false',
   array: 'a list',
   tuple: 'a list',
-  object: 'an object with keys',
-  record: 'an object with keys',
+  object: 'an object in braces',
+  record: 'an object in braces',
 };
 const expectedText = (expected: string): string => EXPECTED[expected] ?? expected;
 const listed = (options: readonly unknown[]): string => options.map((option) => JSON.stringify(option)).join(' or ');

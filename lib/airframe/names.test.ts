@@ -25,12 +25,12 @@ describe('names', () => {
       'wing',
     );
   });
-  it('leave the V of a V tail standing', () => {
+  it('leave the V of a V-tail standing', () => {
     const vee: Airframe = {
       ...pusher,
       surfaces: pusher.surfaces.map(({ name: _, ...one }) => ({ ...one, role: 'vtail' })),
     };
-    expect(elementWithin(vee, 'wing')).toBe('V tail 1');
+    expect(elementWithin(vee, 'wing')).toBe('V-tail 1');
   });
   it('number controls of one kind on a surface', () => {
     const aileron = pusher.surfaces[0]?.controls[0];

@@ -20,7 +20,7 @@ interface Nameable {
   readonly name?: string | undefined;
 }
 
-/** "Servo 1" becomes "servo 1"; "V tail" keeps the letter that is its shape. */
+/** "Servo 1" becomes "servo 1"; "V-tail" keeps the letter that is its shape. */
 const lowered = (word: string): string =>
   /^[A-Z][a-z]/.test(word) ? word.charAt(0).toLowerCase() + word.slice(1) : word;
 

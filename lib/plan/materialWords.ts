@@ -1,6 +1,6 @@
 import type { Material } from '@/lib/airframe/schema/stock';
+import { materials as words } from '@/lib/text/en/elements';
 import { plan } from '@/lib/text/en/plan';
-import { materials as words } from '@/lib/text/en/review';
 import { fill } from '@/lib/text/fill';
 
 /** What a material is called on paper: its kind in words, with its id where two sheets of one kind are equally thick. */

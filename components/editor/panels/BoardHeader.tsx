@@ -1,6 +1,7 @@
 'use client';
 
 import type { ReactNode } from 'react';
+import { Icon } from '@/components/ui/icons';
 import { canRedo, canUndo } from '@/lib/airframe/history';
 import { header as texts } from '@/lib/text/en/board';
 import { shell } from '@/lib/text/en/pages';
@@ -15,17 +16,9 @@ const TOOL =
 const UNDO_PATH = 'M6.5 3 3 6.5 6.5 10M3.5 6.5H9a3.75 3.75 0 0 1 0 7.5H6';
 
 const Arrow = ({ mirrored = false }: { readonly mirrored?: boolean }) => (
-  <svg
-    viewBox="0 0 16 16"
-    width="16"
-    height="16"
-    fill="none"
-    stroke="currentColor"
-    strokeWidth="1.5"
-    aria-hidden="true"
-  >
+  <Icon>
     <path d={UNDO_PATH} transform={mirrored ? 'translate(16 0) scale(-1 1)' : undefined} />
-  </svg>
+  </Icon>
 );
 
 interface BoardHeaderProps {

@@ -9,7 +9,7 @@ import { figureName, type Reading, readingOf, type StripId } from './readings';
 
 // A fixed height: words that come and go during a drag must not move the sheet above them.
 const CELL =
-  'group/cell grid h-[104px] min-w-0 overflow-hidden content-start justify-items-start gap-0 border-l border-rule px-2 py-1 text-left hover:bg-board ' +
+  'group/cell grid h-[104px] md:h-[88px] lg:h-[104px] min-w-0 overflow-hidden content-start justify-items-start gap-0 border-l border-rule px-2 py-1 text-left hover:bg-board ' +
   'data-[level=bad]:bg-[color-mix(in_srgb,var(--bad)_7%,var(--paper))]';
 const VERDICT =
   'flex items-start gap-1 text-xs group-data-[level=good]/cell:text-good group-data-[level=watch]/cell:text-watch group-data-[level=bad]/cell:text-bad';

@@ -1,5 +1,6 @@
 'use client';
 
+import { Icon } from '@/components/ui/icons';
 import { sheet as texts } from '@/lib/text/en/board';
 import { useBoard } from '../useBoard';
 import { zoomSheet } from './fold';
@@ -26,17 +27,9 @@ export function SheetTools() {
     <div className="absolute top-8 left-3 z-10 flex flex-col gap-1">
       {tools.map(({ label, act, path }) => (
         <button key={label} type="button" aria-label={label} title={label} onClick={act} className={BUTTON}>
-          <svg
-            viewBox="0 0 16 16"
-            width="16"
-            height="16"
-            fill="none"
-            stroke="currentColor"
-            strokeWidth="1.5"
-            aria-hidden="true"
-          >
+          <Icon>
             <path d={path} />
-          </svg>
+          </Icon>
         </button>
       ))}
     </div>

@@ -4,6 +4,7 @@ import { pointAt } from '@/lib/airframe/section';
 import { counterClockwise } from '@/lib/geometry/polygons';
 import { notBuiltYet, type Problem } from '@/lib/numerics/result';
 import { length3, mirror3, sub3, type Vec2, type Vec3 } from '@/lib/numerics/vec';
+import { elements } from '@/lib/text/en/elements';
 import { texts } from '@/lib/text/en/parts';
 import { fill } from '@/lib/text/fill';
 import { trimmedDigits } from '@/lib/units/number';
@@ -122,7 +123,7 @@ function sparName(surface: Surface, spar: Spar): string {
 }
 
 /** How a surface is called on a part: its own name, or its role. */
-export const surfaceName = (surface: Surface): string => surface.name ?? texts.roles[surface.role];
+export const surfaceName = (surface: Surface): string => surface.name ?? elements.roles[surface.role];
 
 /** Every spar that begins on this piece. A straight spar cannot follow a joint to another piece: that is a problem. */
 export function sparsOn(run: Run, ring: Ring, tubes: ReadonlyMap<string, Tube>): Sparred {

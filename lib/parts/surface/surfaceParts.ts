@@ -1,3 +1,4 @@
+import { controlWithin } from '@/lib/airframe/names';
 import type { ResolvedControl, ResolvedSurface } from '@/lib/airframe/resolved';
 import type { Material, Tube } from '@/lib/airframe/schema/stock';
 import { notBuiltYet, type Problem } from '@/lib/numerics/result';
@@ -93,7 +94,7 @@ function movingDraft(run: Run, piece: MovingPiece): Draft {
   const { surface } = run.surface;
   const half = run.material.thicknessMm / 2;
   const pivotOff = isDoubleBevel(control) ? 0 : control.hinge.side === 'upper' ? half : -half;
-  const values = { surface: surfaceName(surface), control: texts.controls[control.kind] };
+  const values = { surface: surfaceName(surface), control: controlWithin(surface, control) };
   return {
     key: `${surface.id}/${control.id}/control`,
     name: (side) =>

@@ -7,7 +7,7 @@ export const elements = {
     foreplane: 'Foreplane',
     tailplane: 'Tailplane',
     fin: 'Fin',
-    vtail: 'V tail',
+    vtail: 'V-tail',
     tipFin: 'Tip fin',
   },
   bodies: { box: 'Body', profile: 'Profile body', nacelle: 'Nacelle' },
@@ -34,4 +34,13 @@ export const elements = {
     airbrake: 'Airbrake',
     allMoving: 'All-moving surface',
   },
+} as const;
+
+/** Sheets by what they are. */
+export const materials = {
+  paperFacedBoard: 'paper-faced board',
+  xps: 'extruded polystyrene',
+  epp: 'EPP',
+  balsa: 'balsa',
+  ply: 'ply',
 } as const;

@@ -1,26 +1,5 @@
 // What is written on parts, and what the development of an airframe into parts says to a person.
 
-const roles = {
-  wing: 'Wing',
-  foreplane: 'Foreplane',
-  tailplane: 'Tailplane',
-  fin: 'Fin',
-  vtail: 'V-tail',
-  tipFin: 'Tip fin',
-};
-
-const controls = {
-  aileron: 'aileron',
-  elevator: 'elevator',
-  elevon: 'elevon',
-  flaperon: 'flaperon',
-  rudder: 'rudder',
-  ruddervator: 'ruddervator',
-  flap: 'flap',
-  airbrake: 'airbrake',
-  allMoving: 'all-moving surface',
-};
-
 const names = {
   sheetSide: '{surface}, {side}',
   sheetPanelSide: '{surface} {panel}, {side}',
@@ -121,4 +100,4 @@ const problems = {
   plateCrosses: 'the outline crosses itself',
 };
 
-export const texts = { roles, controls, names, sides, faces, notes, marks, notBuilt, problems, words };
+export const texts = { names, sides, faces, notes, marks, notBuilt, problems, words };

@@ -109,49 +109,5 @@ export const partsText = {
   none: 'This revision holds no list of parts.',
 } as const;
 
-/** Elements by what they are, for those that carry no name of their own. */
-export const elements = {
-  wing: 'wing',
-  foreplane: 'foreplane',
-  tailplane: 'tailplane',
-  fin: 'fin',
-  vtail: 'V-tail',
-  tipFin: 'tip fin',
-  aileron: 'aileron',
-  elevator: 'elevator',
-  elevon: 'elevon',
-  flaperon: 'flaperon',
-  rudder: 'rudder',
-  ruddervator: 'ruddervator',
-  flap: 'flap',
-  airbrake: 'airbrake',
-  allMoving: 'all-moving surface',
-  box: 'body',
-  profile: 'profile body',
-  nacelle: 'nacelle',
-  boom: 'boom',
-  propeller: 'motor and propeller',
-  ductedFan: 'ducted fan',
-  pack: 'pack',
-  controller: 'controller',
-  servo: 'servo',
-  receiver: 'receiver',
-  ballast: 'ballast',
-  hardware: 'hardware',
-  other: 'item',
-  wheel: 'wheel',
-  skid: 'skid',
-  keel: 'keel',
-  towHook: 'tow hook',
-  on: '{what} of the {parent}',
-  withId: '{what} ({id})',
-} as const;
-
-/** Sheets by what they are. */
-export const materials = {
-  paperFacedBoard: 'paper-faced board',
-  xps: 'extruded polystyrene',
-  epp: 'EPP',
-  balsa: 'balsa',
-  ply: 'ply',
-} as const;
+/** A control by the surface that carries it. */
+export const controlOn = '{what} of the {parent}';
