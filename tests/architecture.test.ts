@@ -56,7 +56,12 @@ const LAYERS: readonly Layer[] = [
   { folder: 'lib/structure', own: DOCUMENT },
   { folder: 'lib/parts', own: DOCUMENT, packages: ['clipper2-ts'] },
   { folder: 'lib/balance', own: FLAT },
-  { folder: 'lib/figures', own: [...FLAT, 'lib/balance', 'lib/aero', 'lib/power', 'lib/structure'] },
+  { folder: 'lib/flight', own: [...DOCUMENT, 'lib/aero', 'lib/power'], packages: ['ml-matrix'] },
+  { folder: 'lib/linkage', own: DOCUMENT },
+  {
+    folder: 'lib/figures',
+    own: [...FLAT, 'lib/balance', 'lib/aero', 'lib/power', 'lib/structure', 'lib/flight', 'lib/linkage'],
+  },
   { folder: 'lib/scale', own: [...FLAT, 'lib/balance', 'lib/figures'] },
   { folder: 'lib/layout', own: FLAT, packages: ['clipper2-ts'] },
   {

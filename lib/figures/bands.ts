@@ -1,9 +1,6 @@
-// Every limit that a verdict or a band rests on, with where it comes from. Nothing here is hidden in code elsewhere.
+import type { Limit } from '@/lib/flight/limits';
 
-export interface Limit {
-  readonly value: number;
-  readonly source: string;
-}
+// Every limit that a verdict or a band rests on, with where it comes from. Nothing here is hidden in code elsewhere.
 
 /** Usual from `good[0]` to `good[1]`; beyond `watch` it is bad. */
 export interface VerdictBand {
@@ -37,9 +34,6 @@ export const FLAT_PLATE_CL_MAX = {
 /** Share of the up-elevator that must be enough to trim, and share of the greatest lift that it must trim. */
 export const TRIM_ELEVATOR_SHARE: Limit = { value: 0.8, source: PRACTICE };
 export const TRIM_LIFT_SHARE: Limit = { value: 0.9, source: PRACTICE };
-
-/** Most that a control shared by pitch and roll can turn for both together, degrees one way. */
-export const SHARED_THROW_DEG: Limit = { value: 28, source: PRACTICE };
 
 /** How far from the forward to the aft limit the first flight is balanced: inside the front third. */
 export const FIRST_FLIGHT_SHARE: Limit = { value: 0.25, source: PRACTICE };

@@ -1,10 +1,10 @@
 import type { Derivatives } from '@/lib/aero/lattice/derivatives';
 import type { Airframe } from '@/lib/airframe/schema/airframe';
+import { type PitchCommand, pitchCommand, rollCommand } from '@/lib/flight/commands';
 import { degFromRad } from '@/lib/numerics/vec';
 import { texts } from '@/lib/text/en/figures';
 import { STANDARD_GRAVITY } from '@/lib/units/factors';
 import { PITCH_FEEL, ROLL_HELIX } from './bands';
-import { type PitchCommand, pitchCommand, rollCommand } from './commands';
 import type { WingReference } from './reference';
 import type { Stability } from './stability';
 import { airOf } from './stall';
@@ -54,7 +54,7 @@ export function pitchFeel(
   stability: Stability,
   massG: number,
 ): FigureValue {
-  const command = pitchCommand(airframe, lift);
+  const command = pitchCommand(airframe, lift.symmetric.controls);
   if (!command) return doesNotApply(texts.problems.noPitchControl);
   const at = (x: number) => pullPerDeg(airframe, wing, lift, command, massG, x - stability.neutralPointX);
   const pull = at(stability.neutralPointX);
@@ -85,7 +85,7 @@ const ROLL_WORDS = {
 /** Steady roll: the moment of the ailerons against the damping of the roll, pb / 2V = -Cl_command / Cl_p. */
 export function rollFeel(airframe: Airframe, wing: WingReference, lift: Derivatives): FigureSet {
   const damping = lift.antisymmetric?.rollRate.roll;
-  const command = rollCommand(airframe, lift);
+  const command = lift.antisymmetric && rollCommand(airframe, lift.antisymmetric.controls);
   if (damping === undefined || !command) {
     const figure = doesNotApply(texts.problems.noRollControl);
     return { rollRatePerDeg: figure, rollHelix: figure };

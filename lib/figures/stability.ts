@@ -1,11 +1,11 @@
 import type { Derivatives } from '@/lib/aero/lattice/derivatives';
 import type { Airframe } from '@/lib/airframe/schema/airframe';
+import { neutralControls, pitchCommand } from '@/lib/flight/commands';
 import type { Problem } from '@/lib/numerics/result';
 import { texts } from '@/lib/text/en/figures';
 import { fill } from '@/lib/text/fill';
 import { fixedDigits } from '@/lib/units/number';
 import { FIRST_FLIGHT_SHARE, NEUTRAL_POINT_BAND_PCT, TRIM_ELEVATOR_SHARE, TRIM_LIFT_SHARE } from './bands';
-import { neutralControls, pitchCommand } from './commands';
 import type { WingReference } from './reference';
 import type { ClMax } from './stall';
 import type { FigureValue, Verdict } from './types';
@@ -96,10 +96,10 @@ const emptyRange = (fore: number, aft: number): Problem => ({
  * the reference point, x = x_ref - c M / L (Etkin & Reid, "Dynamics of Flight", ch. 2, longitudinal trim).
  */
 function trimLimitX(airframe: Airframe, wing: WingReference, lift: Derivatives, clMax: number): number | null {
-  const command = pitchCommand(airframe, lift);
+  const command = pitchCommand(airframe, lift.symmetric.controls);
   if (!command) return null;
   const { base, alpha } = lift.symmetric;
-  const rest = neutralControls(airframe, lift);
+  const rest = neutralControls(airframe, lift.symmetric.controls);
   const wanted = clMax * TRIM_LIFT_SHARE.value;
   const used = TRIM_ELEVATOR_SHARE.value;
   const angle = (wanted - base.lift - rest.lift - used * command.lift) / alpha.lift;

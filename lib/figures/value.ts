@@ -1,7 +1,7 @@
 import { type Problem, type Result, refuse } from '@/lib/numerics/result';
 import { texts } from '@/lib/text/en/figures';
 import type { VerdictBand } from './bands';
-import type { FigureId } from './table';
+import type { FigureId } from './table/entry';
 import type { FigureValue, Verdict } from './types';
 
 /** Some of the figures; each part of the analysis gives its own. */

@@ -1,0 +1,1 @@
+export const controlsEntries = {} as const;
