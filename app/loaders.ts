@@ -11,8 +11,8 @@ const SHOWN = [
   'allUpMassG',
   'wingLoadingGdm2',
   'stallSpeedMs',
-  'cgXMm',
-  'neutralPointXMm',
+  'cgAtBodySideMm',
+  'neutralPointPct',
   'staticMarginPct',
 ];
 

@@ -1,4 +1,5 @@
 import { wrap } from 'comlink';
+import type { Corrections } from '@/lib/aero/corrections';
 import type { Airframe } from '@/lib/airframe/schema/airframe';
 import type { Figures } from '@/lib/figures/types';
 import type { FiguresWorker, TimedFigures } from '@/workers/figures.worker';
@@ -7,6 +8,7 @@ import { latestWins } from './latestWins';
 export interface FiguresJob {
   readonly airframe: Airframe;
   readonly depth: 'live' | 'full';
+  readonly corrections: Corrections;
 }
 
 export interface FiguresSource {
@@ -30,11 +32,11 @@ export function figuresSource({ show, failed }: FiguresListener): FiguresSource 
     fault = new Error(event.message || 'the figures worker did not start');
     endWaiting(fault);
   });
-  const run = ({ airframe, depth }: FiguresJob) =>
+  const run = ({ airframe, depth, corrections }: FiguresJob) =>
     new Promise<TimedFigures>((resolve, reject) => {
       if (fault !== null) return reject(fault);
       endWaiting = reject;
-      remote.analyse(airframe, depth).then(resolve, reject);
+      remote.analyse(airframe, depth, corrections).then(resolve, reject);
     });
   const queue = latestWins<FiguresJob, TimedFigures>({
     run,

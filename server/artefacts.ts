@@ -17,9 +17,13 @@ export interface PackedArtefact {
   readonly sha256: string;
 }
 
+/** The artefact "parts": the parts, and what the check before cutting found about them. */
+type FrozenParts = Frozen['development'] & Pick<Frozen, 'checks'>;
+
 /** What is frozen, one compressed body a kind. */
-export async function packFrozen({ figures, development, layout }: Frozen): Promise<PackedArtefact[]> {
-  const contents: Record<ArtefactKind, unknown> = { figures, parts: development, layout };
+export async function packFrozen({ figures, development, layout, checks }: Frozen): Promise<PackedArtefact[]> {
+  const parts: FrozenParts = { ...development, checks };
+  const contents: Record<ArtefactKind, unknown> = { figures, parts, layout };
   return Promise.all(
     ARTEFACT_KINDS.map(async (kind) => {
       const text = JSON.stringify(contents[kind]);
@@ -42,12 +46,14 @@ export async function frozenFigures(db: Db, revisionId: string): Promise<Figures
 /** All that was frozen at the release; nothing of it is computed again. */
 export async function frozenOf(db: Db, revisionId: string): Promise<Frozen> {
   const bodies = new Map((await artefactsOf(db, revisionId)).map(({ kind, body }) => [kind, body]));
-  const [figures, development, layout] = [bodies.get('figures'), bodies.get('parts'), bodies.get('layout')];
-  if (figures === undefined || development === undefined || layout === undefined)
+  const [figures, parts, layout] = [bodies.get('figures'), bodies.get('parts'), bodies.get('layout')];
+  if (figures === undefined || parts === undefined || layout === undefined)
     throw new RangeError(`revision ${revisionId} has ${[...bodies.keys()].join(', ')} frozen, and not all of it`);
+  const { checks, ...development } = await unpackJson<FrozenParts>(parts);
   return {
     figures: await unpackJson<Frozen['figures']>(figures),
-    development: await unpackJson<Frozen['development']>(development),
+    development,
     layout: await unpackJson<Frozen['layout']>(layout),
+    ...(checks === undefined ? {} : { checks }),
   };
 }

@@ -37,6 +37,19 @@ describe('the examples', () => {
       expect(number('cgXMm')).toBeLessThan(number('cgAftLimitXMm'));
     });
 
+    it('reaches its first-flight CG with the pack on its slide', () => {
+      expect(figures.values.packFirstFlightMm?.verdict?.level).toBe('good');
+      const { slide } = airframe.items.find(({ kind }) => kind === 'pack') ?? {};
+      expect(number('packFirstFlightMm')).toBeGreaterThan(slide?.fromMm ?? Number.NaN);
+      expect(number('packFirstFlightMm')).toBeLessThan(slide?.toMm ?? Number.NaN);
+    });
+
+    it('has a motor that can give the thrust it is said to give', () => {
+      expect(number('staticThrustN')).toBe(airframe.drives[0]?.statedThrustN);
+      expect(figures.values.staticThrustN?.verdict).toBeUndefined();
+      expect(figures.values.thrustToWeight?.verdict?.level).toBe('good');
+    });
+
     it('stalls below its target and has the mass and area it was drawn for', () => {
       expect(number('stallSpeedMs')).toBeLessThan(target.stallMs);
       expect(number('allUpMassG')).toBeGreaterThan(target.massG[0]);

@@ -16,6 +16,7 @@ describe.each(startingLayouts)('starting layout $id', ({ id }) => {
     expect(figures.problems).toEqual([]);
     expect(value('cgXMm')).toBeGreaterThan(value('cgForeLimitXMm'));
     expect(value('cgXMm')).toBeLessThan(value('cgAftLimitXMm'));
+    expect(figures.values.packFirstFlightMm?.verdict?.level).toBe('good');
     expect(1.1 * value('stallSpeedMs')).toBeLessThan(8);
     const bad = Object.entries(figures.values).filter(([, { verdict }]) => verdict?.level === 'bad');
     expect(bad.map(([name]) => name)).toEqual([]);

@@ -24,6 +24,11 @@ const figures: Figures = {
       verdict: { level: 'good', words: 'slow enough' },
       inputs: [{ name: 'mass', value: 390.12345, unit: 'g' }],
     },
+    wingAreaDm2: { value: 18.5806 },
+    tailVolumeH: {
+      value: null,
+      problem: { code: 'does-not-apply', path: 'surfaces', message: 'there is no tailplane' },
+    },
     spanMm: {
       value: null,
       problem: { code: 'not-built-yet', path: 'surfaces.0', message: 'not built yet: surfaces.0' },
@@ -33,7 +38,13 @@ const figures: Figures = {
 
 describe('figureRows', () => {
   it('reads in the order of the table, with what the table no longer knows at the end', () => {
-    expect(figureRows(figures).map(({ id }) => id)).toEqual(['spanMm', 'stallSpeedMs', 'retiredFigure']);
+    expect(figureRows(figures).map(({ id }) => id)).toEqual([
+      'spanMm',
+      'wingAreaDm2',
+      'tailVolumeH',
+      'stallSpeedMs',
+      'retiredFigure',
+    ]);
   });
   it('takes only what is asked for, in that order, and skips what there is not', () => {
     expect(figureRows(figures, ['stallSpeedMs', 'macMm', 'spanMm']).map(({ id }) => id)).toEqual([
@@ -61,5 +72,23 @@ describe('figureRows', () => {
       text: '12.35',
       explanation: '',
     });
+  });
+  it('names the group of each, and another one for what the table no longer knows', () => {
+    const rows = figureRows(figures, ['stallSpeedMs', 'spanMm', 'retiredFigure']);
+    expect(rows.map(({ group }) => group)).toEqual(['performance', 'shape', 'other']);
+  });
+  it('tells what does not apply from what could not be worked out', () => {
+    const [tail, span] = figureRows(figures, ['tailVolumeH', 'spanMm']);
+    expect(tail).toMatchObject({ text: null, problem: 'there is no tailplane' });
+    expect(tail?.absent).not.toBe(span?.absent);
+  });
+  it('shows value, band and inputs in the units asked for', () => {
+    // 0.44704 m/s to the mile an hour, 9.2903 dm² to the square foot.
+    expect(figureRows(figures, ['stallSpeedMs'], 'imperial')[0]).toMatchObject({
+      text: '15.8',
+      unit: 'mph',
+      band: '14.8 to 16.8',
+    });
+    expect(figureRows(figures, ['wingAreaDm2'], 'imperial')[0]).toMatchObject({ text: '2.0000', unit: 'ft²' });
   });
 });

@@ -1,16 +1,21 @@
-import { FIGURES } from '@/lib/figures/table';
+import { FIGURES, type FigureEntry, type FigureGroup } from '@/lib/figures/table';
 import type { Figures, FigureValue, Verdict } from '@/lib/figures/types';
+import { list } from '@/lib/text/en/figurePages';
 import { figuresText } from '@/lib/text/en/review';
 import { fill } from '@/lib/text/fill';
-import { fixedDigits, trimmedDigits } from '@/lib/units/number';
+import type { UnitSystem } from '@/lib/units/quantity';
+import { type Measure, measured, shownBySymbol } from './units';
 
 /** A figure as it is read: texts only, nothing left to work out. */
 export interface FigureRow {
   readonly id: string;
+  /** `other` for what a frozen revision holds and the table of today does not. */
+  readonly group: FigureGroup | 'other';
   readonly name: string;
-  /** Null when it could not be worked out; `problem` then says why. */
+  /** Null when there is no value; `absent` then says so in a word or two, and `problem` why. */
   readonly text: string | null;
   readonly unit: string;
+  readonly absent: string;
   readonly problem?: string;
   readonly verdict?: { readonly level: Verdict; readonly words: string };
   readonly band?: string;
@@ -22,36 +27,52 @@ export interface FigureRow {
   readonly limits: string;
 }
 
-const entries = new Map<string, (typeof FIGURES)[keyof typeof FIGURES]>(Object.entries(FIGURES));
+const entries = new Map<string, FigureEntry>(Object.entries(FIGURES));
 
-function rowOf(id: string, figure: FigureValue): FigureRow {
+/** How a figure is shown whose name the table no longer holds. */
+const UNKNOWN: Measure = { unit: '', quantity: 'none', digits: 2 };
+const NO_WORDS = { explanation: '', method: '', source: '', limits: '' };
+
+function rowOf(id: string, figure: FigureValue, system: UnitSystem): FigureRow {
   const { value, band, verdict, inputs = [], problem } = figure;
   const entry = entries.get(id);
-  const digits = entry?.digits ?? 2;
-  const number = (each: number) => fixedDigits(each, digits);
+  const { explanation, method, source, limits } = entry ?? NO_WORDS;
+  const read = (each: number) => measured(each, entry ?? UNKNOWN, system);
   return {
     id,
+    group: entry?.group ?? 'other',
     name: entry?.name ?? id,
-    text: value === null ? null : number(value),
-    unit: entry?.unit ?? '',
+    text: value === null ? null : read(value).number,
+    unit: read(0).unit,
+    absent: problem?.code === 'does-not-apply' ? list.doesNotApply : figuresText.notWorkedOut,
     problem: problem?.message,
     verdict,
-    band: band === undefined ? undefined : fill(figuresText.bandOf, { low: number(band.low), high: number(band.high) }),
+    band:
+      band === undefined
+        ? undefined
+        : fill(figuresText.bandOf, { low: read(band.low).number, high: read(band.high).number }),
     bandCause: band?.cause,
-    inputs: inputs.map((input) => ({ name: input.name, text: trimmedDigits(input.value, 3), unit: input.unit })),
-    explanation: entry?.explanation ?? '',
-    method: entry?.method ?? '',
-    source: entry?.source ?? '',
-    limits: entry?.limits ?? '',
+    inputs: inputs.map((input) => {
+      const { number, unit } = shownBySymbol(input.value, input.unit, 3, system);
+      return { name: input.name, text: number, unit };
+    }),
+    explanation,
+    method,
+    source,
+    limits,
   };
 }
 
 /** The figures in the order of the table, then any the table of today no longer knows; only those named in `ids` when given. */
-export function figureRows({ values }: Figures, ids?: readonly string[]): readonly FigureRow[] {
+export function figureRows(
+  { values }: Figures,
+  ids?: readonly string[],
+  system: UnitSystem = 'metric',
+): readonly FigureRow[] {
   const known = ids ?? [...entries.keys()];
   const rest = ids === undefined ? Object.keys(values).filter((id) => !entries.has(id)) : [];
   return [...known, ...rest].flatMap((id) => {
     const figure = values[id];
-    return figure === undefined ? [] : [rowOf(id, figure)];
+    return figure === undefined ? [] : [rowOf(id, figure, system)];
   });
 }

@@ -11,6 +11,12 @@ export const paths = {
     `/w/${workshop}/d/${design}/r/${String(number)}` as const,
   print: (workshop: string, design: string, number: number) =>
     `/w/${workshop}/d/${design}/r/${String(number)}/print` as const,
+  figures: (workshop: string, design: string, number: number) =>
+    `/w/${workshop}/d/${design}/r/${String(number)}/figures` as const,
+  setUp: (workshop: string, design: string, number: number) =>
+    `/w/${workshop}/d/${design}/r/${String(number)}/set-up` as const,
+  parts: (workshop: string, design: string, number: number) =>
+    `/w/${workshop}/d/${design}/r/${String(number)}/parts` as const,
 };
 
 /** An address of a page inside the workshops. */

@@ -2,7 +2,9 @@ import type { ResolvedAirframe, ResolvedSurface, Section } from '@/lib/airframe/
 import type { Airframe } from '@/lib/airframe/schema/airframe';
 import { add3, lerp3, radFromDeg, type Vec3 } from '@/lib/numerics/vec';
 import { bodyHalfWidthMm } from './bodyWidth';
+import { sameMeanLine } from './lattice/stations';
 import type { LatticeSection } from './lattice/types';
+import { meanLineOf } from './meanLine';
 
 /** A wing whose root stands this much outside the body's side, in mm, is still fixed to it: play of a slot and a doubler. */
 const AT_THE_BODY_MM = 3;
@@ -30,13 +32,14 @@ export function flatSurface(
   const start = panels[0]?.root;
   let quarter: Vec3 = start ? lerp3(start.le, start.te, 0.25) : [0, 0, 0];
   for (const { panel, root, tip, rollDeg } of panels) {
-    const flat = flatSection(quarter, root);
+    const lineAt = (chordMm: number) => meanLineOf(airframe, panel, chordMm);
+    const flat = { ...flatSection(quarter, root), meanLine: lineAt(root.chordMm) };
     const before = sections.at(-1);
-    if (!before || before.chord !== flat.chord || before.incidenceRad !== flat.incidenceRad) sections.push(flat);
+    if (!before || !continues(before, flat)) sections.push(flat);
     const roll = radFromDeg(rollDeg);
     const aft = panel.lengthMm * Math.tan(radFromDeg(panel.sweepDeg));
     quarter = add3(quarter, [aft, panel.lengthMm * Math.cos(roll), panel.lengthMm * Math.sin(roll)]);
-    sections.push(flatSection(quarter, tip));
+    sections.push({ ...flatSection(quarter, tip), meanLine: lineAt(tip.chordMm) });
   }
   const first = sections[0];
   const lies = Math.abs(panels[0]?.rollDeg ?? 0) < 45;
@@ -47,6 +50,12 @@ export function flatSurface(
   const centre: LatticeSection = { ...first, le: [first.le[0], 0, first.le[2]] };
   return { sections: [centre, ...sections], carriedMm: y, lengthMm: lengthMm + y };
 }
+
+/** True when a panel begins with the very section that the one before it ends with. */
+const continues = (before: LatticeSection, next: LatticeSection) =>
+  before.chord === next.chord &&
+  before.incidenceRad === next.incidenceRad &&
+  sameMeanLine(before.meanLine ?? [], next.meanLine ?? []);
 
 /** A section along x about its quarter point. That is where the plate has it before incidence turns it: the angle is kept apart. */
 function flatSection([x, y, z]: Vec3, { chordMm, incidenceDeg }: Section): LatticeSection {

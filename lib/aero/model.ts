@@ -42,7 +42,7 @@ export interface AeroModel {
   readonly controls: ReadonlyMap<string, SymmetricEffect>;
   /** Where the lift due to angle of attack acts, x in mm. */
   readonly neutralPointX: number;
-  /** Moment about the reference point that the thrust line gives per N of thrust is the caller's; the model is power off. */
+  /** What it is made of; power off. */
   readonly contributions: readonly Contribution[];
   /** Derivatives in roll and yaw at an angle of attack: those that grow with lift are in them. */
   readonly lateral: (state: SymmetricState) => LateralDerivatives;

@@ -49,7 +49,7 @@ describe('plan', () => {
     expect(drawn.maxX).toBeCloseTo(205, 9);
   });
   it('draws an item as its box', () => {
-    expect(box(of(plan, 'pack'))).toEqual({ minX: -178, maxX: -108, minY: -16, maxY: 16 });
+    expect(box(of(plan, 'pack'))).toEqual({ minX: -200, maxX: -130, minY: -16, maxY: 16 });
   });
 });
 
@@ -72,7 +72,7 @@ describe('side and front', () => {
     expect(maxY).toBeGreaterThan(450 * Math.sin((2 * Math.PI) / 180));
   });
   it('shows the body’s tops and bottoms from the side and its widest frame from the front', () => {
-    expect(box(of(sideOutlines(pusher), 'pod'))).toEqual({ minX: -195, maxX: 175, minY: -56, maxY: -4 });
+    expect(box(of(sideOutlines(pusher), 'pod'))).toEqual({ minX: -230, maxX: 175, minY: -56, maxY: -4 });
     expect(box(of(frontOutlines(pusher), 'pod'))).toEqual({ minX: -28, maxX: 28, minY: -56, maxY: -4 });
   });
   it('shows a disc round from behind', () => {

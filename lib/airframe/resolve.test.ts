@@ -167,9 +167,9 @@ describe('mounts', () => {
       ...base,
       items: [{ ...first, mount: { to: 'pod', at: [1, 2, 3], end } }, ...rest],
     });
-    near(place(on('aft'), first.id), [-195 + 370 + 1, 2, -1]);
-    near(place(on('fore'), first.id), [-194, 2, -1]);
-    near(place(on(undefined), first.id), [-194, 2, -1]);
+    near(place(on('aft'), first.id), [-230 + 405 + 1, 2, -1]);
+    near(place(on('fore'), first.id), [-229, 2, -1]);
+    near(place(on(undefined), first.id), [-229, 2, -1]);
   });
   it('refuses loops of any length by name, and what hangs on them does not hang the program', () => {
     const loop: Airframe = {
@@ -226,7 +226,7 @@ describe('controls', () => {
   it('hinge where their chord share says', () => {
     const control = resolved(base).controls.find(({ control: { id } }) => id === 'elevator');
     near(control?.hingeInner ?? [0, 0, 0], [435 + 105 * 0.65, 0, 1]);
-    near(control?.hingeOuter ?? [0, 0, 0], [435 + 105 * 0.65, 125 * 0.98, 1]);
+    near(control?.hingeOuter ?? [0, 0, 0], [435 + 105 * 0.65, 125 * 0.82, 1]);
   });
   it('turn about their axis when the whole surface moves', () => {
     const tail = base.surfaces.find(({ id }) => id === 'tail');

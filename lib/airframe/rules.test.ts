@@ -151,7 +151,7 @@ describe('what no sheet can be cut to', () => {
       path: 'bodies.0.formers.0.xMm',
       value: 500,
       code: 'outside-body',
-      says: '370 mm',
+      says: '405 mm',
     },
     {
       name: 'an opening that ends first',

@@ -1,5 +1,5 @@
-import { add3, scale3, sub3, type Vec3 } from '@/lib/numerics/vec';
-import { addSpread, offsetSpread, POINT, type Spread } from './spread';
+import type { Vec3 } from '@/lib/numerics/vec';
+import { gathered, type Spread } from './spread';
 
 /** What a balance needs of each mass; a line without a spread is a point. */
 export interface Weighed {
@@ -31,25 +31,26 @@ const GMM2_PER_KGM2 = 1e9;
  * Throws RangeError when nothing weighs anything, for then there is no centre.
  */
 export function balance(lines: readonly Weighed[]): Balance {
-  const massG = lines.reduce((sum, line) => sum + line.massG, 0);
+  const { massG, at: cg, spread } = gathered(lines);
   if (!(massG > 0)) throw new RangeError(`a balance needs mass, got ${massG} g`);
-  const moment = lines.reduce<Vec3>((sum, line) => add3(sum, scale3(line.at, line.massG)), [0, 0, 0]);
-  const cg = scale3(moment, 1 / massG);
-  const spread = lines.reduce<Spread>(
-    (sum, line) => addSpread(sum, addSpread(line.spread ?? POINT, offsetSpread(line.massG, sub3(line.at, cg)))),
-    POINT,
-  );
+  return { massG, cg, inertiaKgM2: inertiaOf(spread) };
+}
+
+/** Moments and product integrals of a spread about its own centre, kg m2. */
+export function inertiaOf(spread: Spread): Balance['inertiaKgM2'] {
   const si = (value: number) => value / GMM2_PER_KGM2;
   return {
-    massG,
-    cg,
-    inertiaKgM2: {
-      xx: si(spread.yy + spread.zz),
-      yy: si(spread.xx + spread.zz),
-      zz: si(spread.xx + spread.yy),
-      xy: si(spread.xy),
-      xz: si(spread.xz),
-      yz: si(spread.yz),
-    },
+    xx: si(spread.yy + spread.zz),
+    yy: si(spread.xx + spread.zz),
+    zz: si(spread.xx + spread.yy),
+    xy: si(spread.xy),
+    xz: si(spread.xz),
+    yz: si(spread.yz),
   };
+}
+
+/** Radii of gyration in roll, pitch and yaw, mm: where the whole mass would have to lie to be as hard to turn. */
+export function gyrationMm({ massG, inertiaKgM2 }: Balance): { roll: number; pitch: number; yaw: number } {
+  const radius = (momentKgM2: number) => Math.sqrt((momentKgM2 * GMM2_PER_KGM2) / massG);
+  return { roll: radius(inertiaKgM2.xx), pitch: radius(inertiaKgM2.yy), yaw: radius(inertiaKgM2.zz) };
 }

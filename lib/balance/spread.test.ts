@@ -3,11 +3,10 @@ import { describe, expect, it } from 'vitest';
 import type { Vec2, Vec3 } from '@/lib/numerics/vec';
 import { balance, type Weighed } from './balance';
 import {
-  addSpread,
   barSpread,
   boxSpread,
+  gathered,
   mirrorSpread,
-  offsetSpread,
   POINT,
   plate,
   rodSpread,
@@ -75,9 +74,15 @@ describe('spreads', () => {
     expect(inertiaKgM2.yy).toBeCloseTo((0.04 * 0.1 ** 2) / 4, 12);
   });
   it('mirrored twice is the same, and a pair has no product across the centre plane', () => {
-    const spread = addSpread(offsetSpread(5, [1, 2, 3]), rodSpread(4, [0, 0, 0], [10, 20, 5]));
+    const { spread } = gathered([
+      { massG: 5, at: [1, 2, 3] },
+      { massG: 4, at: [5, 10, 2.5], spread: rodSpread(4, [0, 0, 0], [10, 20, 5]) },
+    ]);
     expect(mirrorSpread(mirrorSpread(spread))).toEqual(spread);
-    const pair = addSpread(spread, mirrorSpread(spread));
+    const { spread: pair } = gathered([
+      { massG: 9, at: [7, 5, 1], spread },
+      { massG: 9, at: [7, -5, 1], spread: mirrorSpread(spread) },
+    ]);
     expect([pair.xy, pair.yz]).toEqual([0, 0]);
     expect(pair.xz).not.toBe(0);
   });

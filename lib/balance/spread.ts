@@ -15,7 +15,7 @@ export interface Spread {
 
 export const POINT: Spread = { xx: 0, yy: 0, zz: 0, xy: 0, xz: 0, yz: 0 };
 
-export const addSpread = (a: Spread, b: Spread): Spread => ({
+const addSpread = (a: Spread, b: Spread): Spread => ({
   xx: a.xx + b.xx,
   yy: a.yy + b.yy,
   zz: a.zz + b.zz,
@@ -34,8 +34,42 @@ const outer = (weight: number, [x, y, z]: Vec3): Spread => ({
   yz: weight * y * z,
 });
 
-/** Spread that a mass at an offset adds about the origin (parallel axes). */
-export const offsetSpread = (massG: number, offset: Vec3): Spread => outer(massG, offset);
+interface Mass {
+  readonly massG: number;
+  readonly at: Vec3;
+  /** About its own centre; without one it is a point. */
+  readonly spread?: Spread;
+}
+
+/** Many masses as one: their sum, their common centre, and their spread about it (parallel axes). Not a number without mass. */
+export function gathered(masses: readonly Mass[]): Required<Mass> {
+  let massG = 0;
+  let mx = 0;
+  let my = 0;
+  let mz = 0;
+  for (const { massG: own, at } of masses) {
+    massG += own;
+    mx += at[0] * own;
+    my += at[1] * own;
+    mz += at[2] * own;
+  }
+  const each = 1 / massG;
+  const at: Vec3 = [mx * each, my * each, mz * each];
+  // Summed in place: a list has hundreds of masses, and a dragged handle asks for it every time it moves.
+  const sum = { xx: 0, yy: 0, zz: 0, xy: 0, xz: 0, yz: 0 };
+  for (const { massG: own, at: place, spread = POINT } of masses) {
+    const x = place[0] - at[0];
+    const y = place[1] - at[1];
+    const z = place[2] - at[2];
+    sum.xx += spread.xx + own * x * x;
+    sum.yy += spread.yy + own * y * y;
+    sum.zz += spread.zz + own * z * z;
+    sum.xy += spread.xy + own * x * y;
+    sum.xz += spread.xz + own * x * z;
+    sum.yz += spread.yz + own * y * z;
+  }
+  return { massG, at, spread: sum };
+}
 
 /** A thin rod between two points about its middle: m L^2 / 12 along it. */
 export const rodSpread = (massG: number, from: Vec3, to: Vec3): Spread => outer(massG / 12, sub3(to, from));

@@ -1,193 +1,167 @@
-import { bodyHalfWidthMm } from '@/lib/aero/bodyWidth';
-import type { Derivatives } from '@/lib/aero/lattice/derivatives';
-import { cutAt } from '@/lib/aero/lattice/stations';
+import { ALL_COUNTED, type Corrections } from '@/lib/aero/corrections';
+import type { AeroModel } from '@/lib/aero/model';
 import { resolve } from '@/lib/airframe/resolve';
 import type { ResolvedAirframe } from '@/lib/airframe/resolved';
 import type { Airframe } from '@/lib/airframe/schema/airframe';
-import type { Balance } from '@/lib/balance/balance';
+import type { Stall } from '@/lib/flight/performance/speeds';
 import type { Problem, Result } from '@/lib/numerics/result';
-import { texts } from '@/lib/text/en/figures';
+import { weightFigures } from './balance';
+import type { FigureContext } from './context';
 import { ENGINE_VERSION } from './engine';
-import { pitchFeel, rollFeel } from './feel';
-import { liftOf, sectionProblems } from './lift';
+import { fullGroups } from './groups';
+import { feelFigures } from './handling';
+import { liftOf } from './lift';
+import { marksOf, NO_MARKS } from './marks';
 import { type Masses, massesOf } from './masses';
+import type { AnalyseMemory } from './memory';
 import { type Areas, areasOf, type WingReference, wingFigures } from './reference';
-import { marginFigures, type Stability, stabilityOf, touchFigure } from './stability';
-import { clMaxOf, loadingFigures, reynoldsFigure } from './stall';
+import { setUpSheet } from './setUp';
+import { shapeFigures } from './shape';
+import { type Stability, stabilityOf } from './stability';
+import { airOf, clMaxOf, loadingFigures, stallAt } from './stall';
 import { DECIDING, FIGURES, type FigureId } from './table';
-import type { FigureMarks, Figures } from './types';
-import { allMissing, type FigureSet, firstProblem, known, missing } from './value';
-import { handbookFigure, tailVolumeH, tailVolumeV } from './volumes';
+import { cgTouchFigures, touchFigures } from './touch';
+import type { Figures } from './types';
+import { allMissing, type FigureSet, firstProblem, known } from './value';
+import { wakePlaneProblems } from './wakePlane';
 
 export interface AnalyseOptions {
   /** `live`: the deciding figures, for every move of a handle. `full`: all of them. */
   readonly depth: 'live' | 'full';
+  /** What is counted beside the lifting surfaces; everything when it is not said. */
+  readonly corrections?: Corrections;
+  /** What earlier calls for the same aircraft worked out and this one need not: the figures are the same without it. */
+  readonly memory?: AnalyseMemory;
 }
 
 /**
- * Works out the figures of an airframe: areas, balance, stability and feel, each with its band, verdict and inputs. What could not
- * be worked out is null with its problem; the rest still shows. No figure is ever NaN or infinite.
+ * Works out the figures of an airframe: areas, balance, stability, handling, performance and set-up, each with its band, verdict and
+ * inputs. What could not be worked out is null with its problem; the rest still shows. No figure is ever NaN or infinite.
  */
-export function analyse(airframe: Airframe, { depth }: AnalyseOptions): Figures {
+export function analyse(airframe: Airframe, options: AnalyseOptions): Figures {
+  const { depth } = options;
   const resolved = resolve(airframe);
   if (!resolved.ok) return unresolved(depth, resolved.problems);
   const areas = areasOf(airframe, resolved.value);
-  const masses = massesOf(airframe, resolved.value);
+  const masses = massesOf(airframe, resolved.value, options.memory);
   const { wing } = areas;
-  const weight = massFigures(masses);
-  if (!wing.ok) {
-    const lost = allMissing(wantedIds(depth), firstProblem(wing));
-    return figuresOf(depth, { ...lost, ...weight }, NO_MARKS, masses, wing.problems);
-  }
-  const parts = { airframe, resolved: resolved.value, areas, masses, wing: wing.value };
-  const lift = liftAbout(parts);
-  const stability = lift.ok ? stabilityOf(airframe, wing.value, lift.value, clMaxOf(airframe)) : null;
-  const values = {
-    ...weight,
-    ...wingFigures(wing.value),
-    ...stabilityFigures(parts, lift, stability),
-    ...loadings(parts),
-    ...feelFigures(parts, lift, stability),
-    ...(depth === 'full' ? fullFigures(parts, lift, stability) : {}),
+  if (!wing.ok)
+    return figuresOf(options, masses, {
+      values: massFigures(masses),
+      lost: firstProblem(wing),
+      problems: wing.problems,
+    });
+  const stall = masses.balance.ok ? stallAt(airframe, wing.value, masses.balance.value.massG) : null;
+  const start: Start = { airframe, resolved: resolved.value, areas, masses, wing: wing.value, stall };
+  const model = modelAbout(start, options);
+  const plain = { ...massFigures(masses), ...wingFigures(wing.value), ...loadings(start) };
+  const shape = depth === 'full' ? shapeFigures(start, model) : {};
+  if (!model.ok)
+    return figuresOf(options, masses, {
+      values: { ...plain, ...shape },
+      lost: firstProblem(model),
+      problems: model.problems,
+      marks: marksOf(wing.value, null),
+    });
+  const stability = stabilityAt(start, model.value);
+  const values = { ...plain, ...shape, ...stability.figures, ...touchFigures({ ...start, stability }) };
+  const marks = marksOf(wing.value, stability);
+  if (!masses.balance.ok)
+    return figuresOf(options, masses, {
+      values,
+      lost: firstProblem(masses.balance),
+      problems: stability.problems,
+      marks,
+    });
+  const context: FigureContext = {
+    ...start,
+    lines: masses.weighed,
+    balance: masses.balance.value,
+    model: model.value,
+    stability,
+    air: airOf(airframe),
   };
-  const problems = [...sectionProblems(airframe), ...(lift.ok ? [] : lift.problems), ...(stability?.problems ?? [])];
-  return figuresOf(depth, values, marksOf(parts, stability), masses, problems);
+  const weights = weightFigures(context);
+  const cg = weights.cgXMm ? cgTouchFigures(context, wing.value, weights.cgXMm) : {};
+  if (depth === 'live')
+    return figuresOf(options, masses, {
+      values: { ...values, ...weights, ...cg, ...feelFigures(context) },
+      problems: stability.problems,
+      marks,
+    });
+  const groups = fullGroups(context);
+  return figuresOf(options, masses, {
+    values: { ...values, ...cg, ...groups.figures },
+    problems: [...stability.problems, ...wakePlaneProblems(areas.surfaces), ...(groups.problems ?? [])],
+    marks,
+    charts: groups.charts,
+    setUp: setUpSheet(airframe),
+  });
 }
 
-interface Parts {
+/** What there is before any aerodynamics. */
+export interface Start {
   readonly airframe: Airframe;
   readonly resolved: ResolvedAirframe;
   readonly areas: Areas;
   readonly masses: Masses;
   readonly wing: WingReference;
+  /** `null` without a mass. */
+  readonly stall: Stall | null;
 }
 
-/** The lattice about the CG, or about the wing's quarter point when there is no CG; the neutral point is the same. */
-function liftAbout({ airframe, resolved, masses, wing }: Parts): Result<Derivatives> {
-  const point = masses.balance.ok ? masses.balance.value.cg : ([wing.quarterXMm, 0, 0] as const);
-  return liftOf(airframe, resolved, wing, [point[0], 0, point[2]], 'both');
+/** The aircraft about its CG, or about the wing's quarter point when there is no CG; the neutral point is the same. */
+function modelAbout(
+  { airframe, resolved, masses, wing }: Start,
+  { corrections = ALL_COUNTED, memory }: AnalyseOptions,
+): Result<AeroModel> {
+  const [x, , z] = masses.balance.ok ? masses.balance.value.cg : [wing.quarterXMm, 0, 0];
+  return liftOf(airframe, resolved, wing, [x, 0, z], corrections, memory?.aero);
 }
 
-function massFigures({ balance }: Masses): FigureSet {
-  if (!balance.ok) return allMissing(['allUpMassG', 'cgXMm', 'pitchInertiaKgM2'], firstProblem(balance));
-  const { massG, cg, inertiaKgM2 } = balance.value;
-  return { allUpMassG: known(massG), cgXMm: known(cg[0]), pitchInertiaKgM2: known(inertiaKgM2.yy) };
-}
+const stabilityAt = ({ airframe, wing, stall }: Start, model: AeroModel): Stability =>
+  stabilityOf(airframe, wing, model, stall?.clMax ?? clMaxOf(airframe, wing, null));
 
-const LIFT_FIGURES = [
-  'neutralPointXMm',
-  'cgForeLimitXMm',
-  'cgAftLimitXMm',
-  'firstFlightCgXMm',
-  'cgFromBodySideMm',
-  'staticMarginPct',
-] as const satisfies readonly FigureId[];
+const massFigures = ({ balance }: Masses): FigureSet =>
+  balance.ok ? { allUpMassG: known(balance.value.massG), cgXMm: known(balance.value.cg[0]) } : {};
 
-function stabilityFigures(parts: Parts, lift: Result<Derivatives>, stability: Stability | null): FigureSet {
-  if (!lift.ok) return allMissing(LIFT_FIGURES, firstProblem(lift));
-  if (!stability) return {};
-  const { balance } = parts.masses;
-  const { figures, firstFlightX } = stability;
-  return {
-    ...figures,
-    cgFromBodySideMm: touchFigure(firstFlightX, edgeAtBodySide(parts), figures.firstFlightCgXMm),
-    ...(balance.ok
-      ? marginFigures(parts.airframe, parts.wing, stability, balance.value.cg[0])
-      : allMissing(['staticMarginPct'], firstProblem(balance))),
-  };
-}
-
-function loadings({ airframe, masses, wing }: Parts): FigureSet {
-  const { balance } = masses;
-  if (!balance.ok) return allMissing(['wingLoadingGdm2', 'cubicLoadingKgM3', 'stallSpeedMs'], firstProblem(balance));
-  return loadingFigures(airframe, wing, balance.value.massG);
-}
-
-const FEEL_FIGURES = ['pitchPowerPerDeg', 'rollRatePerDeg', 'rollHelix'] as const satisfies readonly FigureId[];
-
-function feelFigures(
-  { airframe, wing, masses }: Parts,
-  lift: Result<Derivatives>,
-  stability: Stability | null,
-): FigureSet {
-  if (!lift.ok || !stability) return allMissing(FEEL_FIGURES, lift.ok ? needsLattice : firstProblem(lift));
-  return {
-    pitchPowerPerDeg: masses.balance.ok
-      ? pitchFeel(airframe, wing, lift.value, stability, masses.balance.value.massG)
-      : missing(firstProblem(masses.balance)),
-    ...rollFeel(airframe, wing, lift.value),
-  };
-}
-
-function fullFigures(
-  { airframe, areas, wing }: Parts,
-  lift: Result<Derivatives>,
-  stability: Stability | null,
-): FigureSet {
-  return {
-    tailVolumeH: tailVolumeH(areas.surfaces, wing),
-    tailVolumeV: tailVolumeV(areas.surfaces, wing),
-    neutralPointHandbookXMm: handbookFigure(areas.surfaces, wing, stability?.neutralPointX ?? null),
-    reynoldsMac: reynoldsFigure(airframe, wing),
-    liftSlopePerRad: lift.ok ? known(lift.value.symmetric.alpha.lift) : missing(firstProblem(lift)),
-  };
-}
-
-const needsLattice: Problem = { code: 'needs-lattice', path: 'surfaces', message: texts.problems.needsLattice };
-
-/** Leading edge of the wing beside the body, or at its root where no body covers it. */
-function edgeAtBodySide({ airframe, resolved, areas }: Parts): { x: number; y: number } | null {
-  const wing = areas.surfaces.find(({ surface }) => surface.role === 'wing' && surface.mirrored);
-  const root = wing?.sections[0];
-  if (!wing || !root) return null;
-  const spans = wing.sections.map(({ le }) => le[1]);
-  const half = bodyHalfWidthMm(airframe, resolved, root.le[0], root.le[0] + root.chord);
-  const y = Math.min(Math.max(half, root.le[1]), spans.at(-1) ?? 0);
-  return { x: cutAt(wing.sections, spans, y).le[0], y };
-}
-
-const NO_MARKS: FigureMarks = {
-  mac: null,
-  aerodynamicCentreXMm: null,
-  neutralPointXMm: null,
-  neutralPointBandXMm: null,
-  cgRangeXMm: null,
-  firstFlightCgXMm: null,
-  cg: null,
-};
-
-const cgOf = (balance: Result<Balance>) => (balance.ok ? balance.value.cg : null);
-
-function marksOf({ wing, masses }: Parts, stability: Stability | null): FigureMarks {
-  return {
-    mac: { lengthMm: wing.macMm, leXMm: wing.macLeXMm, yMm: wing.macYMm, zMm: wing.macZMm },
-    aerodynamicCentreXMm: wing.quarterXMm,
-    neutralPointXMm: stability?.neutralPointX ?? null,
-    neutralPointBandXMm: stability?.bandX ?? null,
-    cgRangeXMm: stability && stability.firstFlightX !== null ? [stability.foreLimitX, stability.aftLimitX] : null,
-    firstFlightCgXMm: stability?.firstFlightX ?? null,
-    cg: cgOf(masses.balance),
-  };
-}
+const loadings = ({ airframe, masses: { balance }, wing, stall }: Start): FigureSet =>
+  balance.ok && stall ? loadingFigures(airframe, wing, balance.value.massG, stall) : {};
 
 const ALL_IDS = Object.values(FIGURES).map(({ id }) => id);
 const wantedIds = (depth: AnalyseOptions['depth']): readonly FigureId[] => (depth === 'live' ? DECIDING : ALL_IDS);
 
+type Found = Partial<Pick<Figures, 'marks' | 'charts'>> & {
+  readonly values: FigureSet;
+  /** Why every figure that is not there is missing. */
+  readonly lost?: Problem;
+  readonly problems: readonly Problem[];
+  readonly setUp?: ReturnType<typeof setUpSheet>;
+};
+
 function figuresOf(
-  depth: AnalyseOptions['depth'],
-  values: FigureSet,
-  marks: FigureMarks,
-  masses: Masses,
-  problems: readonly Problem[],
+  { depth, corrections = ALL_COUNTED }: AnalyseOptions,
+  { balance, lines, problems }: Masses,
+  { values, lost, problems: found, marks = NO_MARKS, charts, setUp }: Found,
 ): Figures {
-  const balanceProblems = masses.balance.ok ? [] : masses.balance.problems;
+  const absent = wantedIds(depth).filter((id) => values[id] === undefined);
+  if (absent.length > 0 && !lost) throw new RangeError(`no figure and no reason: ${absent.join(', ')}`);
+  const shown = Object.fromEntries(wantedIds(depth).flatMap((id) => (values[id] ? [[id, values[id]]] : [])));
   return {
     engine: ENGINE_VERSION,
     depth,
-    values,
-    marks: { ...marks, cg: cgOf(masses.balance) },
-    masses: masses.lines,
-    problems: unique([...masses.problems, ...balanceProblems, ...problems]),
+    counted: corrections,
+    values: { ...shown, ...(lost ? allMissing(absent, lost) : {}) },
+    marks: { ...marks, cg: balance.ok ? balance.value.cg : null },
+    masses: lines,
+    problems: unique([
+      ...problems,
+      ...(balance.ok ? [] : balance.problems),
+      ...found,
+      ...(setUp && !setUp.ok ? setUp.problems : []),
+    ]),
+    ...(charts ? { charts } : {}),
+    ...(setUp ? { setUp: setUp.ok ? setUp.value : null } : {}),
   };
 }
 

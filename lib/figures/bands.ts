@@ -19,17 +19,11 @@ export const NEUTRAL_POINT_BAND_PCT = {
   bare: { value: 2, source: `${PRACTICE}; error of the lattice is under 0.5 %` },
 } as const satisfies Record<string, Limit>;
 
+/** What the far field of the usual lattice is off, %: own tests of refinement, most with fins at the tips. */
+export const SPAN_EFFICIENCY_ERROR_PCT: Limit = { value: 2, source: 'own tests of refinement: up to 1.5 %' };
+
 /** When the simple estimate lies further than this from the lattice, % of the MAC, that is worth a look. */
 export const HANDBOOK_DIFFERENCE_PCT: Limit = { value: 5, source: PRACTICE };
-
-/** Greatest lift coefficient of a plain plate of sheet. */
-export const FLAT_PLATE_CL_MAX = {
-  value: 0.75,
-  low: 0.65,
-  high: 0.85,
-  source:
-    'Pelletier & Mueller, Journal of Aircraft 37(5) 2000, pp. 825-832: thin flat plate, aspect ratio 2, Re 140 000, 0.75 at 20 degrees',
-} as const;
 
 /** Share of the up-elevator that must be enough to trim, and share of the greatest lift that it must trim. */
 export const TRIM_ELEVATOR_SHARE: Limit = { value: 0.8, source: PRACTICE };

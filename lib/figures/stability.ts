@@ -1,17 +1,19 @@
-import type { Derivatives } from '@/lib/aero/lattice/derivatives';
+import type { AeroModel } from '@/lib/aero/model';
 import type { Airframe } from '@/lib/airframe/schema/airframe';
-import { neutralControls, pitchCommand } from '@/lib/flight/commands';
+import { pitchAxis, stickTrims, trimmedCgX, whyNoTrim } from '@/lib/flight/trim';
 import type { Problem } from '@/lib/numerics/result';
-import { texts } from '@/lib/text/en/figures';
+import type { Spread } from '@/lib/numerics/spread';
+import { texts as shared } from '@/lib/text/en/figures';
+import { texts } from '@/lib/text/en/figures/stability';
 import { fill } from '@/lib/text/fill';
 import { fixedDigits } from '@/lib/units/number';
-import { FIRST_FLIGHT_SHARE, NEUTRAL_POINT_BAND_PCT, TRIM_ELEVATOR_SHARE, TRIM_LIFT_SHARE } from './bands';
+import { FIRST_FLIGHT_SHARE, TRIM_ELEVATOR_SHARE, TRIM_LIFT_SHARE } from './bands';
+import { type NeutralPointBand, neutralPointBand } from './neutralBand';
 import type { WingReference } from './reference';
-import type { ClMax } from './stall';
 import type { FigureValue, Verdict } from './types';
-import { doesNotApply, type FigureSet, known, missing } from './value';
+import { type FigureSet, known, missing } from './value';
 
-/** The neutral point and the CG range that follows from it; x in mm. */
+/** The neutral point and the CG range that follows from it; x in mm from the construction origin. */
 export interface Stability {
   readonly neutralPointX: number;
   readonly bandX: readonly [low: number, high: number];
@@ -19,107 +21,154 @@ export interface Stability {
   readonly aftLimitX: number;
   /** `null` when the limits leave nothing between them. */
   readonly firstFlightX: number | null;
+  /** Greatest lift coefficient of the aircraft, as the forward limit used it. */
+  readonly clMax: Spread;
   readonly figures: FigureSet;
   readonly problems: readonly Problem[];
 }
 
-/** Half width of the neutral point's band in % of the MAC, and its cause. */
-export function neutralPointBand(airframe: Airframe): { readonly pct: number; readonly cause: string } {
-  const behind = airframe.drives.some((drive) => drive.facing === 'pusher' || drive.kind === 'ductedFan');
-  if (behind) return { pct: NEUTRAL_POINT_BAND_PCT.pusherOrFan.value, cause: texts.causes.neutralPointPusher };
-  if (airframe.bodies.length > 0)
-    return { pct: NEUTRAL_POINT_BAND_PCT.body.value, cause: texts.causes.neutralPointBody };
-  return { pct: NEUTRAL_POINT_BAND_PCT.bare.value, cause: texts.causes.neutralPointBare };
-}
-
 /**
  * Neutral point, CG range and the CG of the first flight. Both limits are measured from the lowest neutral point of the band, so that
- * the wanted margins hold even there.
+ * the wanted margins hold even there. No lattice is solved: it costs nothing while a handle is dragged.
  */
-export function stabilityOf(airframe: Airframe, wing: WingReference, lift: Derivatives, clMax: ClMax): Stability {
-  const { neutralPointX } = lift.symmetric;
-  const { pct, cause } = neutralPointBand(airframe);
-  const half = (wing.macMm * pct) / 100;
+export function stabilityOf(airframe: Airframe, wing: WingReference, model: AeroModel, clMax: Spread): Stability {
+  const { neutralPointX } = model;
+  const band = neutralPointBand(airframe, model);
+  const half = (wing.macMm * band.pct) / 100;
+  const bandX = [neutralPointX - half, neutralPointX + half] as const;
   const [least, largest] = airframe.flight.staticMarginPct;
-  const lowest = neutralPointX - half;
-  const aftLimitX = lowest - (wing.macMm * least) / 100;
-  const byMargin = lowest - (wing.macMm * Math.max(least, largest)) / 100;
-  const byTrim = trimLimitX(airframe, wing, lift, clMax.value);
-  const foreLimitX = byTrim === null ? byMargin : Math.max(byMargin, byTrim);
+  const aftLimitX = bandX[0] - (wing.macMm * least) / 100;
+  const byMargin = bandX[0] - (wing.macMm * Math.max(least, largest)) / 100;
+  const byTrim = trimLimit(airframe, model, clMax);
+  const foreLimitX = byTrim.x === null ? byMargin : Math.max(byMargin, byTrim.x);
   const empty = foreLimitX > aftLimitX;
   const firstFlightX = empty ? null : foreLimitX + (aftLimitX - foreLimitX) * FIRST_FLIGHT_SHARE.value;
-  const noRange = emptyRange(foreLimitX, aftLimitX);
-  const mm = (name: string, value: number) => ({ name, value, unit: 'mm' });
-  const pctInput = (name: string, value: number) => ({ name, value, unit: '% MAC' });
+  const noRange = emptyRange(pctOfMac(wing, foreLimitX), pctOfMac(wing, aftLimitX));
+  const places = { neutralPointX, bandX, foreLimitX, aftLimitX, firstFlightX };
   return {
-    neutralPointX,
-    bandX: [lowest, neutralPointX + half],
-    foreLimitX,
-    aftLimitX,
-    firstFlightX,
-    problems: [...(empty ? [noRange] : []), ...(byTrim === null ? [noPitchControl] : [])],
-    figures: {
-      neutralPointXMm: known(neutralPointX, {
-        band: { low: lowest, high: neutralPointX + half, cause },
-        inputs: [mm(texts.inputs.mac, wing.macMm), pctInput(texts.inputs.neutralPointBand, pct)],
-      }),
-      cgForeLimitXMm: known(foreLimitX, {
-        inputs: [
-          pctInput(texts.inputs.largestMargin, largest),
-          mm(texts.inputs.foreByMargin, byMargin),
-          ...(byTrim === null ? [] : [mm(texts.inputs.foreByTrim, byTrim)]),
-        ],
-      }),
-      cgAftLimitXMm: known(aftLimitX, { inputs: [pctInput(texts.inputs.leastMargin, least)] }),
-      firstFlightCgXMm: firstFlightX === null ? missing(noRange) : known(firstFlightX),
-    },
+    ...places,
+    clMax,
+    problems: [...(empty ? [noRange] : []), ...byTrim.problems],
+    figures: rangeFigures(wing, [least, largest], places, band, { byMargin, byTrim }, noRange),
   };
+}
+
+/** A place along x in % of the MAC, from its leading edge. */
+const pctOfMac = ({ macLeXMm, macMm }: WingReference, x: number): number => ((x - macLeXMm) / macMm) * 100;
+
+interface TrimLimit {
+  readonly x: number | null;
+  /** By the span of the greatest lift coefficient. */
+  readonly ends: readonly number[];
+  readonly problems: readonly Problem[];
+}
+
+/** The CG at which the stated share of up stick still trims the stated share of the greatest lift, power off. */
+function trimLimit(airframe: Airframe, model: AeroModel, { value, low, high }: Spread): TrimLimit {
+  const axis = pitchAxis(airframe, model);
+  if (!axis) return { x: null, ends: [], problems: [noPitchControl] };
+  if (!stickTrims(axis)) return { x: null, ends: [], problems: whyNoTrim(airframe, model) };
+  const at = (clMax: number) => trimmedCgX(axis, TRIM_ELEVATOR_SHARE.value, clMax * TRIM_LIFT_SHARE.value);
+  return { x: at(value), ends: [at(low), at(high)], problems: [] };
 }
 
 const noPitchControl: Problem = {
   code: 'no-pitch-control',
   path: 'surfaces',
-  message: texts.problems.noPitchControl,
-  fix: texts.problems.noPitchControlFix,
+  message: shared.problems.noPitchControl,
+  fix: shared.problems.noPitchControlFix,
 };
 
 const emptyRange = (fore: number, aft: number): Problem => ({
   code: 'cg-range-empty',
   path: 'flight.staticMarginPct',
-  message: fill(texts.problems.cgRangeEmpty, { fore: fixedDigits(fore, 0), aft: fixedDigits(aft, 0) }),
+  message: fill(texts.problems.cgRangeEmpty, { fore: fixedDigits(fore, 1), aft: fixedDigits(aft, 1) }),
   fix: texts.problems.cgRangeEmptyFix,
 });
 
-/**
- * The CG, x in mm, at which the stated share of up-elevator still balances the stated share of the greatest lift, power off; null
- * without a pitch control. In steady flight the moment about the CG is none: with lift L = L0 + La a + Lc c and moment M likewise about
- * the reference point, x = x_ref - c M / L (Etkin & Reid, "Dynamics of Flight", ch. 2, longitudinal trim).
- */
-function trimLimitX(airframe: Airframe, wing: WingReference, lift: Derivatives, clMax: number): number | null {
-  const command = pitchCommand(airframe, lift.symmetric.controls);
-  if (!command) return null;
-  const { base, alpha } = lift.symmetric;
-  const rest = neutralControls(airframe, lift.symmetric.controls);
-  const wanted = clMax * TRIM_LIFT_SHARE.value;
-  const used = TRIM_ELEVATOR_SHARE.value;
-  const angle = (wanted - base.lift - rest.lift - used * command.lift) / alpha.lift;
-  const moment = base.pitch + rest.pitch + used * command.pitch + alpha.pitch * angle;
-  return lift.lattice.reference.point[0] - (wing.macMm * moment) / wanted;
+type RangePlaces = Pick<Stability, 'neutralPointX' | 'bandX' | 'foreLimitX' | 'aftLimitX' | 'firstFlightX'>;
+
+/** Each place twice: along x for drawing, and in % of the MAC for reading. */
+function rangeFigures(
+  wing: WingReference,
+  [least, largest]: readonly [least: number, largest: number],
+  { neutralPointX, bandX, foreLimitX, aftLimitX, firstFlightX }: RangePlaces,
+  band: NeutralPointBand,
+  { byMargin, byTrim }: { readonly byMargin: number; readonly byTrim: TrimLimit },
+  noRange: Problem,
+): FigureSet {
+  const pct = (x: number) => pctOfMac(wing, x);
+  const same = (x: number) => x;
+  const mac = (name: string, value: number) => ({ name, value, unit: '% MAC' });
+  const neutral = (as: (x: number) => number): FigureValue =>
+    known(as(neutralPointX), {
+      band: { low: as(bandX[0]), high: as(bandX[1]), cause: band.cause },
+      inputs: [
+        { name: shared.inputs.mac, value: wing.macMm, unit: 'mm' },
+        mac(shared.inputs.neutralPointBand, band.pct),
+        ...(band.bodiesPct === null ? [] : [mac(texts.inputs.shiftByBodies, band.bodiesPct)]),
+        ...(band.propellersPct === null ? [] : [mac(texts.inputs.shiftByPropellers, band.propellersPct)]),
+      ],
+    });
+  const fore = (as: (x: number) => number): FigureValue =>
+    known(as(foreLimitX), {
+      ...foreBand(foreLimitX, byMargin, byTrim, as),
+      inputs: [
+        mac(shared.inputs.largestMargin, largest),
+        mac(shared.inputs.foreByMargin, pct(byMargin)),
+        ...(byTrim.x === null ? [] : [mac(shared.inputs.foreByTrim, pct(byTrim.x))]),
+      ],
+    });
+  const aft = (as: (x: number) => number) => known(as(aftLimitX), { inputs: [mac(shared.inputs.leastMargin, least)] });
+  const first = (as: (x: number) => number) => (firstFlightX === null ? missing(noRange) : known(as(firstFlightX)));
+  return {
+    neutralPointXMm: neutral(same),
+    neutralPointPct: neutral(pct),
+    cgForeLimitXMm: fore(same),
+    cgForeLimitPct: fore(pct),
+    cgAftLimitXMm: aft(same),
+    cgAftLimitPct: aft(pct),
+    firstFlightCgXMm: first(same),
+    firstFlightCgPct: first(pct),
+  };
 }
 
-/** Static margin and where the CG lies in its range. */
-export function marginFigures(airframe: Airframe, wing: WingReference, stability: Stability, cgX: number): FigureSet {
-  const pct = (x: number) => ((x - cgX) / wing.macMm) * 100;
-  const margin = pct(stability.neutralPointX);
-  const [low, high] = [pct(stability.bandX[0]), pct(stability.bandX[1])];
+/** Where the elevator may set the forward limit, its band is what the greatest lift leaves open; a margin sets it exactly. */
+function foreBand(
+  foreX: number,
+  byMargin: number,
+  { ends }: TrimLimit,
+  as: (x: number) => number,
+): Pick<FigureValue, 'band'> {
+  const places = [foreX, ...ends.map((x) => Math.max(x, byMargin))];
+  const [low, high] = [Math.min(...places), Math.max(...places)];
+  return low < high ? { band: { low: as(low), high: as(high), cause: texts.causes.clMax } } : {};
+}
+
+/**
+ * Static margin and where the CG lies in its range. The margin's band holds that of the neutral point and, by squares, how far the CG
+ * itself may be out because the masses are.
+ */
+export function marginFigures(
+  airframe: Airframe,
+  wing: WingReference,
+  stability: Stability,
+  cgX: number,
+  cgErrorMm = 0,
+): FigureSet {
+  const pct = (mm: number) => (mm / wing.macMm) * 100;
+  const { neutralPointX, bandX } = stability;
+  const margin = pct(neutralPointX - cgX);
+  const off = (end: number) => pct(Math.hypot(end - neutralPointX, cgErrorMm));
+  const [low, high] = [margin - off(bandX[0]), margin + off(bandX[1])];
   return {
     staticMarginPct: known(margin, {
-      band: { low, high, cause: texts.causes.neutralPoint },
-      verdict: marginVerdict(low, airframe.flight.staticMarginPct),
+      band: { low, high, cause: cgErrorMm > 0 ? texts.causes.neutralPointAndMass : shared.causes.neutralPoint },
+      verdict: marginVerdict([low, high], airframe.flight.staticMarginPct),
       inputs: [
-        { name: texts.inputs.neutralPoint, value: stability.neutralPointX, unit: 'mm' },
-        { name: texts.inputs.cg, value: cgX, unit: 'mm' },
-        { name: texts.inputs.mac, value: wing.macMm, unit: 'mm' },
+        { name: shared.inputs.neutralPoint, value: stability.neutralPointX, unit: 'mm' },
+        { name: shared.inputs.cg, value: cgX, unit: 'mm' },
+        { name: shared.inputs.mac, value: wing.macMm, unit: 'mm' },
       ],
     }),
     cgXMm: known(cgX, { verdict: placeVerdict(stability, cgX) }),
@@ -129,9 +178,13 @@ export function marginFigures(airframe: Airframe, wing: WingReference, stability
 /** A margin this close to a limit meets it: far finer than anyone can balance. */
 const MARGIN_TOLERANCE_PCT = 0.05;
 
-function marginVerdict(low: number, [least, largest]: readonly [number, number]): { level: Verdict; words: string } {
-  const { verdicts } = texts;
+function marginVerdict(
+  [low, high]: readonly [number, number],
+  [least, largest]: readonly [number, number],
+): { level: Verdict; words: string } {
+  const { verdicts } = shared;
   const shown = fixedDigits(low, 1);
+  if (high < 0) return { level: 'bad', words: texts.verdicts.marginUnstable };
   if (low < 0) return { level: 'bad', words: verdicts.marginUnstable };
   if (low < least - MARGIN_TOLERANCE_PCT)
     return { level: 'watch', words: fill(verdicts.marginLow, { low: shown, min: least }) };
@@ -141,22 +194,12 @@ function marginVerdict(low: number, [least, largest]: readonly [number, number])
 }
 
 function placeVerdict({ foreLimitX, aftLimitX, bandX }: Stability, cgX: number): { level: Verdict; words: string } {
-  const { verdicts } = texts;
+  const { verdicts } = shared;
   const behind = cgX - aftLimitX;
   const ahead = foreLimitX - cgX;
+  if (cgX > bandX[1]) return { level: 'bad', words: fill(texts.verdicts.cgUnstable, { mm: fixedDigits(behind, 0) }) };
   if (cgX > bandX[0]) return { level: 'bad', words: fill(verdicts.cgBehindUnstable, { mm: fixedDigits(behind, 0) }) };
   if (behind > 0) return { level: 'watch', words: fill(verdicts.cgBehind, { mm: fixedDigits(behind, 1) }) };
   if (ahead > 0) return { level: 'watch', words: fill(verdicts.cgAhead, { mm: fixedDigits(ahead, 1) }) };
   return { level: 'good', words: verdicts.cgInRange };
-}
-
-/** The first-flight CG from the leading edge that a finger can touch: beside the body, or at the root of a wing without one. */
-export function touchFigure(
-  firstFlightX: number | null,
-  edge: { x: number; y: number } | null,
-  range: FigureValue | undefined,
-): FigureValue {
-  if (firstFlightX === null) return range ?? doesNotApply(texts.problems.needsLattice);
-  if (!edge) return doesNotApply(texts.problems.noWing);
-  return known(firstFlightX - edge.x, { inputs: [{ name: texts.inputs.bodySide, value: edge.y, unit: 'mm' }] });
 }

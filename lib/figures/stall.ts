@@ -1,57 +1,73 @@
 import { type Air, airAt, reynoldsNumber } from '@/lib/aero/atmosphere';
+import { type WingClMax, wingClMax } from '@/lib/aero/clMax';
 import type { Airframe } from '@/lib/airframe/schema/airframe';
-import { texts } from '@/lib/text/en/figures';
+import { type Stall, stallOf } from '@/lib/flight/performance/speeds';
+import { texts as balanceTexts } from '@/lib/text/en/figures/balance';
+import { texts } from '@/lib/text/en/figures/performance';
 import { fill } from '@/lib/text/fill';
-import { STANDARD_GRAVITY } from '@/lib/units/factors';
 import { fixedDigits } from '@/lib/units/number';
-import { FLAT_PLATE_CL_MAX, HAND_THROW_MS, LAUNCH_OVER_STALL } from './bands';
+import { bandOf } from './bandOf';
+import { HAND_THROW_MS, LAUNCH_OVER_STALL } from './bands';
 import type { WingReference } from './reference';
 import type { FigureValue } from './types';
 import { type FigureSet, known } from './value';
 
-/** The greatest lift coefficient used, with its band when it is the flat plate's. */
-export interface ClMax {
-  readonly value: number;
-  readonly band: { readonly low: number; readonly high: number } | null;
-}
-
-export const clMaxOf = ({ flight }: Airframe): ClMax =>
-  flight.clMax === undefined
-    ? { value: FLAT_PLATE_CL_MAX.value, band: FLAT_PLATE_CL_MAX }
-    : { value: flight.clMax, band: null };
+// Loadings and the stall: cheap, for every move of a handle.
 
 export const airOf = ({ flight }: Airframe): Air => airAt(flight.altitudeM, flight.temperatureOffsetC);
 
-const MM2_PER_M2 = 1e6;
+/** Stall of the whole aircraft, power off. Throws RangeError for a document without a wing. */
+export const stallAt = (airframe: Airframe, { areaMm2 }: WingReference, massG: number): Stall =>
+  stallOf(airframe, areaMm2, massG, airOf(airframe));
 
-/** Level speed at which a lift coefficient carries the mass, m/s: V = sqrt(2 m g / (rho S CL)). */
-export function speedAtLift(massG: number, areaMm2: number, cl: number, densityKgM3: number): number {
-  return Math.sqrt((2 * (massG / 1000) * STANDARD_GRAVITY) / (densityKgM3 * (areaMm2 / MM2_PER_M2) * cl));
+/**
+ * Greatest lift coefficient of the aircraft, typed in or by its wing's sections at the stall; without a mass, at cruise speed. Throws
+ * RangeError for a document without a wing.
+ */
+export function clMaxOf(airframe: Airframe, wing: WingReference, massG: number | null): WingClMax {
+  if (massG === null) return wingClMax(airframe, airframe.flight.cruiseMs, airOf(airframe));
+  return stallAt(airframe, wing, massG).clMax;
 }
 
-/** Mass, loadings and stall. */
-export function loadingFigures(airframe: Airframe, wing: WingReference, massG: number): FigureSet {
+/** Why a figure that rests on the greatest lift has a band. */
+export const clMaxCause = ({ source }: WingClMax): string => fill(texts.causes.sectionClMax, { source });
+
+/** Loadings and stall. */
+export function loadingFigures(
+  airframe: Airframe,
+  wing: WingReference,
+  massG: number,
+  stall = stallAt(airframe, wing, massG),
+): FigureSet {
+  return { ...massLoadings(wing, massG), stallSpeedMs: stallSpeed(airframe, massG, stall) };
+}
+
+/** Mass by the wing's area, with what the masses may be out by as their band where that is known. */
+export function massLoadings(wing: WingReference, massG: number, errorG = 0): FigureSet {
   const areaDm2 = wing.areaMm2 / 10_000;
+  const loading = (of: (massG: number) => number): FigureValue =>
+    known(
+      of(massG),
+      errorG > 0 ? { band: bandOf(balanceTexts.causes.mass, of(massG - errorG), of(massG + errorG)) } : {},
+    );
   return {
-    wingLoadingGdm2: known(massG / areaDm2),
-    cubicLoadingKgM3: known(massG / 1000 / (areaDm2 / 100) ** 1.5),
-    stallSpeedMs: stallSpeed(airframe, wing, massG),
+    wingLoadingGdm2: loading((g) => g / areaDm2),
+    cubicLoadingKgM3: loading((g) => g / 1000 / (areaDm2 / 100) ** 1.5),
   };
 }
 
-function stallSpeed(airframe: Airframe, wing: WingReference, massG: number): FigureValue {
-  const clMax = clMaxOf(airframe);
-  const air = airOf(airframe);
-  const at = (cl: number) => speedAtLift(massG, wing.areaMm2, cl, air.densityKgM3);
-  const speed = at(clMax.value);
-  return known(speed, {
-    ...(clMax.band
-      ? { band: { low: at(clMax.band.high), high: at(clMax.band.low), cause: texts.causes.flatPlateClMax } }
-      : {}),
-    ...(airframe.flight.launch === 'hand' ? { verdict: handLaunch(speed) } : {}),
+function stallSpeed(airframe: Airframe, massG: number, { speedMs, clMax }: Stall): FigureValue {
+  const band = {
+    low: speedMs * Math.sqrt(clMax.value / clMax.high),
+    high: speedMs * Math.sqrt(clMax.value / clMax.low),
+    cause: clMaxCause(clMax),
+  };
+  return known(speedMs, {
+    ...(clMax.typed ? {} : { band }),
+    ...(airframe.flight.launch === 'hand' ? { verdict: handLaunch(speedMs) } : {}),
     inputs: [
-      { name: texts.inputs.clMax, value: clMax.value, unit: '' },
-      { name: texts.inputs.density, value: air.densityKgM3, unit: 'kg/m³' },
+      { name: clMax.typed ? texts.inputs.clMaxTyped : texts.inputs.clMax, value: clMax.value, unit: '' },
+      { name: texts.inputs.density, value: airOf(airframe).densityKgM3, unit: 'kg/m³' },
       { name: texts.inputs.mass, value: massG, unit: 'g' },
     ],
   });
@@ -64,9 +80,12 @@ function handLaunch(stallMs: number) {
   return { level: 'watch' as const, words };
 }
 
-/** Reynolds number at the mean aerodynamic chord, cruising. */
-export function reynoldsFigure(airframe: Airframe, wing: WingReference): FigureValue {
-  return known(reynoldsNumber(airframe.flight.cruiseMs, wing.macMm / 1000, airOf(airframe)), {
-    inputs: [{ name: texts.inputs.speed, value: airframe.flight.cruiseMs, unit: 'm/s' }],
+/** Reynolds number of a chord, cruising; by default of the mean aerodynamic chord. */
+export function reynoldsFigure(airframe: Airframe, wing: WingReference, chordMm = wing.macMm): FigureValue {
+  return known(reynoldsNumber(airframe.flight.cruiseMs, chordMm / 1000, airOf(airframe)), {
+    inputs: [
+      { name: texts.inputs.speed, value: airframe.flight.cruiseMs, unit: 'm/s' },
+      { name: texts.inputs.chord, value: chordMm, unit: 'mm' },
+    ],
   });
 }

@@ -1,5 +1,8 @@
+import type { Corrections } from '@/lib/aero/corrections';
 import type { Problem } from '@/lib/numerics/result';
 import type { Vec3 } from '@/lib/numerics/vec';
+import type { Chart } from './charts';
+import type { SetUpSheet } from './setUp';
 
 export type Verdict = 'good' | 'watch' | 'bad';
 
@@ -44,8 +47,14 @@ export interface Figures {
   /** Version of the engine that computed them; a cache key together with the airframe's hash. */
   readonly engine: string;
   readonly depth: 'live' | 'full';
+  /** What was counted beside the lifting surfaces; the first engine counted nothing. */
+  readonly counted?: Corrections;
   readonly values: Readonly<Record<string, FigureValue>>;
   readonly marks: FigureMarks;
   readonly masses: readonly MassLine[];
   readonly problems: readonly Problem[];
+  /** At the depth "full"; earlier engines had none. */
+  readonly charts?: readonly Chart[];
+  /** At the depth "full": throws, mixes and holes; `null` when a control cannot be set up. Earlier engines had none. */
+  readonly setUp?: SetUpSheet | null;
 }

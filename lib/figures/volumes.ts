@@ -1,5 +1,6 @@
 import { wingLiftSlope } from '@/lib/aero/liftSlope';
 import { texts } from '@/lib/text/en/figures';
+import { texts as words } from '@/lib/text/en/figures/stability';
 import { fill } from '@/lib/text/fill';
 import { fixedDigits } from '@/lib/units/number';
 import { HANDBOOK_DIFFERENCE_PCT, TAIL_VOLUME_H, TAIL_VOLUME_V } from './bands';
@@ -32,6 +33,19 @@ function together(
   return { areaMm2, armMm: moment / areaMm2 };
 }
 
+const hasForeplane = (surfaces: readonly SurfaceArea[]) => surfaces.some(({ surface }) => surface.role === 'foreplane');
+
+/** True when two wings stand one behind the other, so that no mean chord stands for both. */
+function inTandem(surfaces: readonly SurfaceArea[]): boolean {
+  const reaches = surfaces
+    .filter(({ surface }) => surface.role === 'wing' && surface.mirrored)
+    .map(({ sections }) => ({
+      fore: Math.min(...sections.map(({ le }) => le[0])),
+      aft: Math.max(...sections.map(({ le, chord }) => le[0] + chord)),
+    }));
+  return reaches.some((a, i) => reaches.slice(0, i).some((b) => a.fore >= b.aft || b.fore >= a.aft));
+}
+
 const isTail = ({ surface }: SurfaceArea) => surface.role === 'tailplane' || surface.role === 'vtail';
 const isFin = ({ surface }: SurfaceArea) =>
   surface.role === 'fin' || surface.role === 'tipFin' || surface.role === 'vtail';
@@ -47,7 +61,7 @@ const inputsOf = (name: string, { areaMm2, armMm }: Stabiliser) => [
 
 export function tailVolumeH(surfaces: readonly SurfaceArea[], wing: WingReference): FigureValue {
   const tail = tailOf(surfaces, wing);
-  if (!tail) return doesNotApply(texts.problems.noTailplane);
+  if (!tail) return doesNotApply(hasForeplane(surfaces) ? texts.problems.foreplaneVolume : texts.problems.noTailplane);
   const volume = (tail.areaMm2 * tail.armMm) / (wing.areaMm2 * wing.macMm);
   return known(volume, {
     verdict: verdictOf(volume, TAIL_VOLUME_H, VOLUME_WORDS),
@@ -59,10 +73,9 @@ export function tailVolumeV(surfaces: readonly SurfaceArea[], wing: WingReferenc
   const fin = together(surfaces.filter(isFin), (s) => s.uprightMm2, wing);
   if (!fin) return doesNotApply(texts.problems.noFin);
   const volume = (fin.areaMm2 * fin.armMm) / (wing.areaMm2 * wing.spanMm);
-  return known(volume, {
-    verdict: verdictOf(volume, TAIL_VOLUME_V, VOLUME_WORDS),
-    inputs: inputsOf(texts.inputs.finArea, fin),
-  });
+  // Usual volumes are of tails behind a wing: with a foreplane the CG lies far ahead of the wing, and the arm says little.
+  const judged = hasForeplane(surfaces) ? {} : { verdict: verdictOf(volume, TAIL_VOLUME_V, VOLUME_WORDS) };
+  return known(volume, { ...judged, inputs: inputsOf(texts.inputs.finArea, fin) });
 }
 
 /**
@@ -72,7 +85,7 @@ export function tailVolumeV(surfaces: readonly SurfaceArea[], wing: WingReferenc
  * foreplane.
  */
 export function handbookNeutralPointX(surfaces: readonly SurfaceArea[], wing: WingReference): number | null {
-  if (surfaces.some(({ surface }) => surface.role === 'foreplane')) return null;
+  if (hasForeplane(surfaces) || inTandem(surfaces)) return null;
   const tails = surfaces.filter(isTail);
   const tail = together(tails, (s) => s.flatMm2, wing);
   if (!tail) return wing.quarterXMm;
@@ -94,7 +107,8 @@ export function handbookFigure(
 ): FigureValue {
   const x = handbookNeutralPointX(surfaces, wing);
   if (x === null) return doesNotApply(texts.problems.foreplaneHandbook);
-  if (latticeX === null) return known(x);
+  const inputs = [{ name: words.inputs.ofMac, value: ((x - wing.macLeXMm) / wing.macMm) * 100, unit: '% MAC' }];
+  if (latticeX === null) return known(x, { inputs });
   const difference = ((x - latticeX) / wing.macMm) * 100;
   const limit = HANDBOOK_DIFFERENCE_PCT.value;
   const verdict =
@@ -104,5 +118,5 @@ export function handbookFigure(
           words: fill(texts.verdicts.handbookDiffers, { difference: fixedDigits(difference, 1) }),
         }
       : { level: 'good' as const, words: fill(texts.verdicts.handbookAgrees, { limit }) };
-  return known(x, { verdict });
+  return known(x, { verdict, inputs });
 }

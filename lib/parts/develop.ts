@@ -1,9 +1,11 @@
-import { elementName } from '@/lib/airframe/names';
+import { namedElements } from '@/lib/airframe/names';
 import { resolve } from '@/lib/airframe/resolve';
-import type { ResolvedAirframe } from '@/lib/airframe/resolved';
+import type { ResolvedAirframe, ResolvedSurface } from '@/lib/airframe/resolved';
 import type { Airframe } from '@/lib/airframe/schema/airframe';
+import type { Tube } from '@/lib/airframe/schema/stock';
+import { eachKept, type Kept, nothingKept } from '@/lib/numerics/kept';
 import type { Problem } from '@/lib/numerics/result';
-import { length3, sub3 } from '@/lib/numerics/vec';
+import { length3, sub3, type Vec3 } from '@/lib/numerics/vec';
 import { texts } from '@/lib/text/en/parts';
 import { fill } from '@/lib/text/fill';
 import { bodyParts } from './body/bodyParts';
@@ -11,17 +13,18 @@ import { withMarks } from './marks/withMarks';
 import type { BoomHere } from './surface/boom';
 import { tooLong } from './surface/spar';
 import { type Developed, surfaceParts } from './surface/surfaceParts';
-import type { Development, Part, StockPiece } from './types';
+import type { Development, StockPiece } from './types';
 import { partFault } from './validate';
 
 const byId = <T extends { readonly id: string }>(list: readonly T[]): ReadonlyMap<string, T> =>
   new Map(list.map((entry) => [entry.id, entry]));
 
 function boomPieces(booms: readonly BoomHere[], airframe: Airframe): { pieces: StockPiece[]; problems: Problem[] } {
+  const names = new Map(booms.length > 0 ? namedElements(airframe).map(({ id, name }) => [id, name]) : []);
   const pieces = booms.map(
     ({ boom, resolved, tube }): StockPiece => ({
       key: `${boom.id}/tube`,
-      name: elementName(airframe, boom.id),
+      name: names.get(boom.id) ?? boom.id,
       tubeId: tube.id,
       lengthMm: length3(sub3(resolved.aft, resolved.fore)),
       count: boom.mirrored ? 2 : 1,
@@ -37,39 +40,61 @@ function boomPieces(booms: readonly BoomHere[], airframe: Airframe): { pieces: S
 
 /** Nothing leaves here that a blade cannot follow: such a part is left out and named at its element. */
 function cuttable(made: Developed, path: string): Developed {
-  const parts: Part[] = [];
+  const sound = new Set<string>();
   const faults: Problem[] = [];
   for (const part of made.parts) {
-    const fault = partFault(part);
+    // A mirror image is as sound as its fellow.
+    const fault = part.mirrorOf && sound.has(part.mirrorOf) ? null : partFault(part);
     if (!fault) {
-      parts.push(part);
+      sound.add(part.key);
       continue;
     }
     const message = fill(texts.problems.partCannotBeCut, { part: part.name, fault });
     faults.push({ code: 'part-cannot-be-cut', path, message, fix: texts.problems.partCannotBeCutFix });
   }
-  return faults.length === 0 ? made : { ...made, parts, problems: [...made.problems, ...faults] };
+  if (faults.length === 0) return made;
+  const parts = made.parts.filter(({ key }) => sound.has(key));
+  return { ...made, parts, problems: [...made.problems, ...faults] };
 }
+
+/** What each surface and body came to the last time. Belongs to the caller. */
+export interface DevelopmentMemory {
+  readonly surfaces: Kept<Developed>;
+  readonly bodies: Kept<Developed>;
+}
+
+/** A memory with nothing in it. */
+export const newDevelopmentMemory = (): DevelopmentMemory => ({ surfaces: nothingKept(), bodies: nothingKept() });
 
 /**
  * As `develop`, for a caller that has the resolved airframe already and reads no marks: the same parts, cut and folded alike,
  * without labels, grain arrows and pin points. `withMarks` adds those.
+ * @param memory surfaces and bodies that have not changed since the last call keep their parts, the very same objects
  */
-export function developResolved(airframe: Airframe, resolved: ResolvedAirframe): Development {
-  const stock = { materials: byId(airframe.materials), tubes: byId(airframe.tubes) };
-  const boomsById = byId(airframe.booms);
-  const booms = resolved.booms.flatMap((place): BoomHere[] => {
-    const boom = boomsById.get(place.boomId);
-    const tube = boom && stock.tubes.get(boom.tubeId);
-    return boom && tube ? [{ boom, resolved: place, tube }] : [];
+export function developResolved(
+  airframe: Airframe,
+  resolved: ResolvedAirframe,
+  memory?: DevelopmentMemory,
+): Development {
+  const { materials, tubes } = airframe;
+  const stock = { materials: byId(materials), tubes: byId(tubes) };
+  const booms = boomsHere(airframe, resolved, stock.tubes);
+  const controlsOf = ({ surface }: ResolvedSurface) =>
+    resolved.controls.filter(({ surfaceId }) => surfaceId === surface.id);
+  const surfaces = eachKept(memory?.surfaces, { materials, tubes, booms }, resolved.surfaces, {
+    nameOf: ({ surface }) => surface.id,
+    from: (surface) => [surface, controlsOf(surface)],
+    work: (surface) => cuttable(surfaceParts(surface, controlsOf(surface), stock, booms), `surfaces.${surface.index}`),
   });
-  const surfaces = resolved.surfaces.map((surface) =>
-    cuttable(surfaceParts(surface, resolved.controls, stock, booms), `surfaces.${surface.index}`),
-  );
-  const bodies = airframe.bodies.map((body, index) => {
-    const place = resolved.places.get(body.id);
-    if (!place) throw new RangeError(`body ${body.id} has no place in the resolved airframe`);
-    return cuttable(bodyParts(body, index, place.at, stock.materials), `bodies.${index}`);
+  const placeOf = (id: string): Vec3 => {
+    const place = resolved.places.get(id);
+    if (!place) throw new RangeError(`body ${id} has no place in the resolved airframe`);
+    return place.at;
+  };
+  const bodies = eachKept(memory?.bodies, materials, airframe.bodies, {
+    nameOf: ({ id }) => id,
+    from: (body, index) => [body, index, placeOf(body.id)],
+    work: (body, index) => cuttable(bodyParts(body, index, placeOf(body.id), stock.materials), `bodies.${index}`),
   });
   const { pieces, problems } = boomPieces(booms, airframe);
   return {
@@ -77,6 +102,15 @@ export function developResolved(airframe: Airframe, resolved: ResolvedAirframe):
     stockPieces: [...surfaces.flatMap(({ stockPieces }) => stockPieces), ...pieces],
     problems: [...[...surfaces, ...bodies].flatMap((made) => made.problems), ...problems],
   };
+}
+
+function boomsHere(airframe: Airframe, resolved: ResolvedAirframe, tubes: ReadonlyMap<string, Tube>): BoomHere[] {
+  const boomsById = byId(airframe.booms);
+  return resolved.booms.flatMap((place): BoomHere[] => {
+    const boom = boomsById.get(place.boomId);
+    const tube = boom && tubes.get(boom.tubeId);
+    return boom && tube ? [{ boom, resolved: place, tube }] : [];
+  });
 }
 
 /**

@@ -13,7 +13,9 @@ describe('what cannot be developed', () => {
   it.each([
     {
       name: 'another section',
-      over: withPanel({ section: { kind: 'folded', thicknessShare: 0.08, maxAt: 0.3, lowerTo: 0.9, webAt: 0.3 } }),
+      over: withPanel({
+        section: { kind: 'stepped', layers: [{ from: 0, to: 0.4, face: 'upper', materialId: 'board' }] },
+      }),
       problem: 'not-built-yet surfaces.0.panels.0.section.kind',
     },
     { name: 'washout', over: withPanel({ washoutDeg: 2 }), problem: 'not-built-yet surfaces.0.panels.0.washoutDeg' },

@@ -3,6 +3,9 @@ import { join } from 'node:path';
 import { describe, expect, it } from 'vitest';
 import { parseAirframeText } from '@/lib/airframe/parse';
 import type { Airframe } from '@/lib/airframe/schema/airframe';
+import type { Mount } from '@/lib/airframe/schema/common';
+import { setUpSheet } from '@/lib/figures/setUp';
+import type { Figures } from '@/lib/figures/types';
 import { layOut } from '@/lib/layout/layOut';
 import { LAYOUT_DEFAULTS, stockOf } from '@/lib/layout/stock';
 import { develop } from '@/lib/parts/develop';
@@ -14,7 +17,7 @@ const example = (name: string): Airframe => {
   if (!parsed.ok) throw new Error(JSON.stringify(parsed.problems));
   return parsed.value;
 };
-const notesOf = (airframe: Airframe, cgXMm: number | null = null) => {
+const notesOf = (airframe: Airframe, cgXMm: number | null = null, more: Partial<Figures> = {}) => {
   const development = develop(airframe);
   const layout = layOut(development.parts, stockOf(airframe), LAYOUT_DEFAULTS);
   const marks = {
@@ -26,7 +29,7 @@ const notesOf = (airframe: Airframe, cgXMm: number | null = null) => {
     firstFlightCgXMm: cgXMm,
     cg: null,
   };
-  const figures = { engine: '1', depth: 'full', values: {}, marks, masses: [], problems: [] } as const;
+  const figures = { engine: '1', depth: 'full', values: {}, marks, masses: [], problems: [], ...more } as const;
   return buildNotes(airframe, development, layout, figures);
 };
 
@@ -46,12 +49,15 @@ describe('buildNotes', () => {
     // 0.67 of 15, 10 and 12.
     expect(setUp).toContain('Wing, aileron: up 15° (10.1°), down 10° (6.7°)');
     expect(setUp).toContain('Tailplane, elevator: up 12° (8°), down 12° (8°)');
-    expect(setUp.some((row) => row.endsWith('thrust line 0° down, 0° right'))).toBe(true);
+    expect(setUp.some((row) => row.endsWith('thrust line straight.'))).toBe(true);
   });
 
   it('gives the place of the pack from the balance line, and none without one', () => {
-    // The document puts the pack's middle 151 mm ahead of the datum, to slide 15 mm forward and 40 mm aft.
-    const { setUp } = notesOf(airframe, 50);
+    // 151 mm ahead of the datum, and the line 50 mm behind it.
+    const mount: Mount = { to: 'datum', at: [-151, 0, 0] };
+    const slide = { fromMm: -15, toMm: 40 };
+    const items = airframe.items.map((item) => (item.kind === 'pack' ? { ...item, mount, slide } : item));
+    const { setUp } = notesOf({ ...airframe, items }, 50);
     expect(setUp.some((row) => row.includes('201 mm ahead of the first-flight CG (estimate)'))).toBe(true);
     expect(setUp).toContain('It slides 15 mm forward and 40 mm aft of there.');
     expect(notesOf(airframe).setUp.some((row) => row.includes('first-flight CG'))).toBe(false);
@@ -59,6 +65,26 @@ describe('buildNotes', () => {
 
   it('calls a reflexed elevon up: a negative neutral angle lifts the trailing edge', () => {
     expect(notesOf(example('hask')).setUp).toContain('Wing, elevon: neutral 2.5° up');
+  });
+
+  it('leaves the throws to the set-up sheet where the figures hold one, and says so where they do not', () => {
+    const hask = example('hask');
+    const sheet = setUpSheet(hask);
+    if (!sheet.ok) throw new RangeError(sheet.problems[0]?.message);
+    const { setUp } = notesOf(hask, null, { setUp: sheet.value });
+    expect(setUp.some((row) => /elevon: up/.test(row))).toBe(false);
+    // The document's low rate and expo.
+    expect(setUp[0]).toContain('67 %');
+    expect(setUp[1]).toContain('Expo 30 %');
+    expect(setUp.some((row) => /^Wing, elevon: neutral up [\d.]+ mm \(2.5°\)$/.test(row))).toBe(true);
+    expect(setUp.some((row) => row.includes('no set-up sheet'))).toBe(false);
+    expect(notesOf(hask, null, { setUp: null }).setUp.some((row) => row.includes('no set-up sheet'))).toBe(true);
+  });
+
+  it('says how far the pack has to go for the first flight', () => {
+    const verdict = { level: 'good', words: 'move it 12 mm aft' } as const;
+    const { setUp } = notesOf(airframe, 50, { values: { packFirstFlightMm: { value: 12, verdict } } });
+    expect(setUp).toContain('Pack, to bring the CG there: move it 12 mm aft.');
   });
 });
 

@@ -3,6 +3,8 @@ import { resolve } from '@/lib/airframe/resolve';
 import type { Airframe } from '@/lib/airframe/schema/airframe';
 import type { Tube } from '@/lib/airframe/schema/stock';
 import type { Control, Surface } from '@/lib/airframe/schema/surface';
+import type { SetUpSheet } from '@/lib/figures/setUp';
+import { radioRows, thrustText } from '@/lib/figures/setUpWords';
 import type { Figures } from '@/lib/figures/types';
 import type { SheetLayout } from '@/lib/layout/types';
 import type { Development } from '@/lib/parts/types';
@@ -10,6 +12,7 @@ import { plan } from '@/lib/text/en/plan';
 import { fill } from '@/lib/text/fill';
 import { trimmedDigits } from '@/lib/units/number';
 import { materialWords } from './materialWords';
+import { moveWords } from './throwRows';
 
 // What a builder gathers and sets besides the parts, one line each, for the first page.
 
@@ -18,7 +21,7 @@ const words = plan.build;
 export interface BuildNotes {
   /** Sheets by kind, then tubes and rods. */
   readonly need: readonly string[];
-  /** Throws, neutral settings, thrust lines, and where the pack goes. */
+  /** Rates and expo, neutral settings, thrust lines, and where the pack goes; throws where no table of them can be made. */
   readonly setUp: readonly string[];
 }
 
@@ -62,6 +65,7 @@ function tubeNeeds(airframe: Airframe, development: Development): string[] {
 
 const deg = (angle: number): string => trimmedDigits(Math.abs(angle), 1);
 
+/** Throws as the document has them: all there is where the figures hold no set-up sheet. */
 function controlNotes(airframe: Airframe, surface: Surface, control: Control): string[] {
   const { up, down, lowShare } = control.throwsDeg;
   const name = fill(words.control, {
@@ -81,22 +85,37 @@ function controlNotes(airframe: Airframe, surface: Surface, control: Control): s
   return [throws, fill(neutral, { control: name, angle: deg(control.neutralDeg) })];
 }
 
-function thrustNotes(airframe: Airframe): string[] {
-  return airframe.drives.map(({ id, thrustDeg: [down, right] }) =>
-    fill(words.thrust, {
-      drive: elementName(airframe, id),
-      down: fill(down < 0 ? words.thrustUp : words.thrustDown, { angle: deg(down) }),
-      right: fill(right < 0 ? words.thrustLeft : words.thrustRight, { angle: deg(right) }),
-    }),
+function documentNotes(airframe: Airframe): string[] {
+  const notes = airframe.surfaces.flatMap((surface) =>
+    surface.controls.flatMap((control) => controlNotes(airframe, surface, control)),
   );
+  return notes.length > 0 ? [...notes, words.rates, words.setUpMissing] : [];
 }
+
+/** What is set beside the throws of the table. */
+function sheetNotes(sheet: SetUpSheet): string[] {
+  const { controls } = sheet;
+  if (controls.length === 0) return [];
+  const raised = controls
+    .filter(({ neutral }) => neutral.way !== 'none')
+    .map(({ surface, control, neutral }) =>
+      fill(words.neutral, { control: fill(words.control, { surface, control }), move: moveWords(neutral) }),
+    );
+  return [...radioRows(sheet).map(({ text }) => text), ...(raised.length > 0 ? raised : [words.neutralLevel])];
+}
+
+const thrustNotes = (airframe: Airframe): string[] =>
+  airframe.drives.map(({ id, thrustDeg: [downDeg, rightDeg] }) =>
+    thrustText({ name: elementName(airframe, id), downDeg, rightDeg }),
+  );
 
 /** Where packs go, from the line on which the aircraft is to balance: a place that can be marked and touched. */
 function packNotes(airframe: Airframe, figures: Figures | null): string[] {
   const cgXMm = figures?.marks.firstFlightCgXMm;
   const resolved = resolve(airframe);
   if (cgXMm === undefined || cgXMm === null || !resolved.ok) return [];
-  return airframe.items.flatMap(({ id, kind, slide }) => {
+  const move = figures?.values.packFirstFlightMm?.verdict;
+  const places = airframe.items.flatMap(({ id, kind, slide }) => {
     const place = resolved.value.places.get(id);
     if (kind !== 'pack' || !place) return [];
     const aftMm = place.at[0] - cgXMm;
@@ -112,23 +131,22 @@ function packNotes(airframe: Airframe, figures: Figures | null): string[] {
     };
     return [where, fill(words.packSlides, reach)];
   });
+  return places.length > 0 && move ? [...places, fill(words.packMove, { words: move.words })] : places;
 }
 
-/** The lines of the first page beside the figures. Throws are the document's own; the pack's place follows from an estimate. */
+/** The lines of the first page beside figures and throws. The pack's place follows from an estimate. */
 export function buildNotes(
   airframe: Airframe,
   development: Development,
   layout: SheetLayout,
   figures: Figures | null,
 ): BuildNotes {
-  const throws = airframe.surfaces.flatMap((surface) =>
-    surface.controls.flatMap((control) => controlNotes(airframe, surface, control)),
-  );
+  const sheet = figures?.setUp;
   const tubes = tubeNeeds(airframe, development);
   return {
     need: [...sheetNeeds(airframe, layout), ...(tubes.length > 0 ? tubes : [words.noTube])],
     setUp: [
-      ...(throws.length > 0 ? [...throws, words.rates] : []),
+      ...(sheet ? sheetNotes(sheet) : documentNotes(airframe)),
       ...thrustNotes(airframe),
       ...packNotes(airframe, figures),
     ],

@@ -1,6 +1,9 @@
 import { readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { describe, expect, it } from 'vitest';
+import { parseAirframe } from '@/lib/airframe/parse';
+import { analyse } from '@/lib/figures/analyse';
+import type { Figures } from '@/lib/figures/types';
 import { layOut } from '@/lib/layout/layOut';
 import { LAYOUT_DEFAULTS } from '@/lib/layout/stock';
 import { sampleParts } from '@/tests/support/parts';
@@ -41,6 +44,42 @@ describe('parseExport', () => {
   it('keeps the engine that computed the frozen figures', () => {
     const result = parseExport({ airframe, frozen: { ...frozen, figures: { ...frozen.figures, engine: '2031.4' } } });
     expect(result).toMatchObject({ ok: true, value: { frozen: { figures: { engine: '2031.4' } } } });
+  });
+
+  describe('figures of this engine', () => {
+    const parsed = parseAirframe(airframe);
+    if (!parsed.ok) throw new RangeError(parsed.problems[0]?.message);
+    const full: Figures = analyse(parsed.value, { depth: 'full' });
+    const file = (figures: unknown): unknown =>
+      JSON.parse(JSON.stringify({ airframe: parsed.value, frozen: { ...frozen, figures } }));
+    const text = JSON.stringify(full);
+
+    it('come through whole, with charts and set-up sheet', () => {
+      expect(full.charts?.length).toBeGreaterThan(0);
+      expect(full.setUp?.controls.length).toBeGreaterThan(0);
+      const result = parseExport(file(full));
+      expect(result.ok && result.value.frozen?.figures).toEqual(JSON.parse(text));
+      const failed = parseExport(file({ ...full, setUp: null }));
+      expect(failed.ok && failed.value.frozen?.figures.setUp).toBeNull();
+    });
+
+    it.each([
+      ['a way that is none', /"way":"up"/, '"way":"sideways"', /setUp\.controls\.0\.throws/],
+      [
+        'a throw of a million millimetres',
+        /"way":"up","deg":15,"mm":[\d.]+/,
+        '"way":"up","deg":15,"mm":1e6',
+        /throws\.0\.high\.mm/,
+      ],
+      ['a control without a name', /"control":"aileron",/, '', /setUp\.controls\.0\.control/],
+      ['a low rate over the whole throw', /"lowRate":[\d.]+/, '"lowRate":4', /setUp\.lowRate/],
+      ['a chart of words', /"points":\[\[[^\]]+\]/, '"points":[["a","b"]', /charts\.0\.series\.0\.points/],
+    ])('%s is refused at its path', (_, found, put, path) => {
+      const edited = text.replace(found, put);
+      expect(edited).not.toBe(text);
+      const [first] = pathsOf(file(JSON.parse(edited)));
+      expect(first).toMatch(path);
+    });
   });
 
   it.each([

@@ -1,4 +1,5 @@
 import type { Airframe } from '@/lib/airframe/schema/airframe';
+import type { CheckResult } from '@/lib/checks/types';
 import type { Figures } from '@/lib/figures/types';
 import type { SheetLayout } from '@/lib/layout/types';
 import type { Problem } from '@/lib/numerics/result';
@@ -14,6 +15,8 @@ export interface Frozen {
   readonly figures: Figures;
   readonly development: Development;
   readonly layout: SheetLayout;
+  /** What the check before cutting found; earlier engines had none. */
+  readonly checks?: readonly CheckResult[];
 }
 
 export type JobRequest =

@@ -4,6 +4,7 @@ import {
   G_PER_OZ,
   GDM2_PER_OZFT2,
   KGM3_PER_OZFT3,
+  MM_PER_FT,
   MM_PER_IN,
   MS_PER_MPH,
   N_PER_LBF,
@@ -38,6 +39,7 @@ const pair = (
 /** Quantities by the unit that the document and the figures hold them in. Units without an everyday imperial twin stay as they are. */
 export const QUANTITIES = {
   mm: pair('mm', 'in', MM_PER_IN, 2),
+  m: pair('m', 'ft', MM_PER_FT / 1000, 0),
   g: pair('g', 'oz', G_PER_OZ, 2),
   dm2: pair('dm²', 'ft²', DM2_PER_FT2, 2),
   cm2: pair('cm²', 'in²', DM2_PER_IN2 * 100, 1),
@@ -58,6 +60,7 @@ export const QUANTITIES = {
   w: same('W'),
   rpm: same('rpm'),
   s: same('s'),
+  mpa: same('MPa'),
   none: same(''),
 } as const;
 export type Quantity = keyof typeof QUANTITIES;

@@ -1,9 +1,14 @@
+import { resolve } from '@/lib/airframe/resolve';
 import type { Airframe } from '@/lib/airframe/schema/airframe';
+import { checkBeforeCut } from '@/lib/checks/checkBeforeCut';
+import type { CheckFigures, CheckResult } from '@/lib/checks/types';
 import { analyse } from '@/lib/figures/analyse';
+import type { Figures } from '@/lib/figures/types';
 import { layOut } from '@/lib/layout/layOut';
 import { LAYOUT_DEFAULTS, stockOf } from '@/lib/layout/stock';
 import { ok, type Result, refuse } from '@/lib/numerics/result';
 import { develop } from '@/lib/parts/develop';
+import type { Development } from '@/lib/parts/types';
 import type { ExportFile, Frozen } from '@/lib/plan/job';
 import { layoutProblems, makePlan } from '@/lib/plan/makePlan';
 import type { PlanFile } from '@/lib/plan/manifest';
@@ -13,11 +18,29 @@ import { plan } from '@/lib/text/en/plan';
 import { fill } from '@/lib/text/fill';
 import { readFonts } from './fonts';
 
+/** The figures that the check before cutting asks for, as far as they could be worked out. */
+function checkFigures({ marks, values }: Figures): CheckFigures {
+  const known = (id: string): number | undefined => values[id]?.value ?? undefined;
+  return {
+    cg: marks.cg ?? undefined,
+    packFirstFlightMm: known('packFirstFlightMm'),
+    hingeTorquePct: known('hingeTorquePct'),
+  };
+}
+
+/** What the check before cutting finds; undefined for an airframe whose pieces stand nowhere. */
+function checksOf(airframe: Airframe, development: Development, figures: Figures): CheckResult[] | undefined {
+  const resolved = resolve(airframe);
+  if (!resolved.ok) return undefined;
+  return checkBeforeCut({ airframe, resolved: resolved.value, development, figures: checkFigures(figures) });
+}
+
 /** Everything that is frozen at a release, computed from the document. */
 export function compute(airframe: Airframe): Frozen {
   const development = develop(airframe);
   const layout = layOut(development.parts, stockOf(airframe), LAYOUT_DEFAULTS);
-  return { figures: analyse(airframe, { depth: 'full' }), development, layout };
+  const figures = analyse(airframe, { depth: 'full' });
+  return { figures, development, layout, checks: checksOf(airframe, development, figures) };
 }
 
 /** What a release keeps; refused when the parts cannot be printed, for a revision is there to be cut. */

@@ -2,9 +2,8 @@ import { threadsOf, verdictsOf } from '@/db/queries/review';
 import { revisionSummary, revisionsOf } from '@/db/queries/revisions';
 import type { Db } from '@/db/types';
 import type { RevisionAnswer, RevisionSummary, ThreadAnswer, VerdictRow } from '@/lib/contract/answers';
-import type { Development } from '@/lib/parts/types';
 import type { PlanRevision } from '@/lib/plan/drawing';
-import type { ExportFile } from '@/lib/plan/job';
+import type { ExportFile, Frozen } from '@/lib/plan/job';
 import { frozenFigures, frozenOf } from '../artefacts';
 import type { Who } from '../context';
 import { storedAirframe } from '../drafts';
@@ -82,15 +81,15 @@ export async function revision(
   return revisionAnswer(db, member, designId, number);
 }
 
-/** The parts frozen at the release, for showing them beside the comments. */
+/** The parts frozen at the release, with what the check before cutting found about them. */
 export async function revisionParts(
   who: Who,
   workshopId: string,
   designId: string,
   number: number,
-): Promise<Development> {
+): Promise<Pick<Frozen, 'development' | 'checks'>> {
   const { db, member } = await open(who, workshopId, 'revision.read');
-  return (await exportIn(db, member, designId, number)).frozen.development;
+  return (await exportIn(db, member, designId, number)).frozen;
 }
 
 export async function threads(who: Who, workshopId: string, designId: string, number: number): Promise<ThreadAnswer[]> {

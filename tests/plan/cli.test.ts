@@ -83,7 +83,13 @@ describe('sheets', () => {
     const files = ids.flatMap((id) => [`${id}.svg`, `${id}.dxf`]);
     expect(readdirSync(join(folder, 'a4')).sort()).toEqual([...files, 'manifest.json', 'plan.pdf'].sort());
     const words = textOf(join(folder, 'a4/plan.pdf'));
-    for (const said of ['DRAFT', 'Sheet 1 · paper-faced board, 5 mm', '5/3 mm tube, 470 mm', 'up 15° (10.1°)']) {
+    for (const said of [
+      'DRAFT',
+      'Sheet 1 · paper-faced board, 5 mm',
+      '5/3 mm tube, 470 mm',
+      '(15°)',
+      'Propeller off for every set-up',
+    ]) {
       expect(words).toContain(said);
     }
   });

@@ -1,9 +1,10 @@
 import { describe, expect, it } from 'vitest';
+import { FLAT_PLATE_CL_MAX } from '@/lib/aero/clMax';
 import { resolve } from '@/lib/airframe/resolve';
 import type { Airframe } from '@/lib/airframe/schema/airframe';
-import { FLAT_PLATE_CL_MAX, TAIL_VOLUME_H, TAIL_VOLUME_V } from '@/lib/figures/bands';
+import { TAIL_VOLUME_H, TAIL_VOLUME_V } from '@/lib/figures/bands';
 import { areasOf } from '@/lib/figures/reference';
-import { loadingFigures } from '@/lib/figures/stall';
+import { clMaxOf, loadingFigures } from '@/lib/figures/stall';
 import { tailVolumeH } from '@/lib/figures/volumes';
 import { GDM2_PER_OZFT2, KGM3_PER_OZFT3 } from '@/lib/units/factors';
 import { airframe, panel, surface } from '@/tests/support/airframe';
@@ -80,6 +81,14 @@ describe('T6: greatest lift of a flat plate (Pelletier & Mueller, Journal of Air
       expect(measured).toBeGreaterThan(FLAT_PLATE_CL_MAX.low);
       expect(measured).toBeLessThan(FLAT_PLATE_CL_MAX.high);
     }
+  });
+
+  it("the wing of the aircraft has the plate's, by its own sections and at its own stall", () => {
+    const document = trainer();
+    const { wing } = wingAndAreas(document);
+    // 8.4 m/s on a chord of 0.2 m is Re 115 000, near theirs of 140 000.
+    expect(clMaxOf(document, wing, 800)).toMatchObject({ value: 0.75, typed: false });
+    expect(clMaxOf(trainer({ clMax: 0.9 }), wing, 800)).toMatchObject({ value: 0.9, low: 0.9, high: 0.9, typed: true });
   });
 
   it('stalls without an entry of its own as with 0.75, in a band from 0.85 to 0.65', () => {

@@ -1,4 +1,5 @@
 import type { Airframe } from '@/lib/airframe/schema/airframe';
+import type { Drive } from '@/lib/airframe/schema/equipment';
 import type { Body, Boom } from '@/lib/airframe/schema/fuselage';
 import type { Material, Tube } from '@/lib/airframe/schema/stock';
 import type { Control, Panel, Surface } from '@/lib/airframe/schema/surface';
@@ -124,5 +125,19 @@ export const airframe = (over: Partial<Airframe> = {}): Airframe => ({
     launch: 'hand',
   },
   build: { cutter: 'hand', kerfMm: 0.1, slotClearanceMm: 0.2, glueGPerM: 8, glueGm2: 30, tapeGm2: 50 },
+  ...over,
+});
+
+/** A small tractor by default; the mount is the disc's centre. */
+export const drive = (over: Partial<Extract<Drive, { kind: 'propeller' }>> = {}): Drive => ({
+  id: 'motor',
+  kind: 'propeller',
+  mount: { to: 'datum', at: [-200, 0, 0] },
+  mirrored: false,
+  facing: 'tractor',
+  turns: 'cw',
+  thrustDeg: [0, 0],
+  motor: { massG: 40, diameterMm: 28, lengthMm: 30, kvRpmPerV: 1000 },
+  propeller: { diameterMm: 203, pitchMm: 127, blades: 2, massG: 8 },
   ...over,
 });

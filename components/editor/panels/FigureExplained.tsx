@@ -13,10 +13,10 @@ export function FigureExplained({ id }: { readonly id: StripId }) {
   const settled = useBoardState((state) => state.settled);
   const system = useBoardState((state) => state.system);
   if (settled === null) return <p>{texts.working}</p>;
-  const inside = id === 'cgXMm' ? cgInside(settled.marks, system) : null;
+  const inside = id === 'cgAtBodySideMm' ? cgInside(settled.marks, system) : null;
   return (
     <div className="grid gap-3">
-      {figureRows(settled, [id]).map((row) => (
+      {figureRows(settled, [id], system).map((row) => (
         <div key={row.id} className="grid gap-3">
           <p className="flex flex-wrap items-baseline gap-x-4">
             {row.text === null ? texts.none : <Value text={row.text} unit={row.unit} large />}

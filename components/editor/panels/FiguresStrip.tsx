@@ -6,9 +6,9 @@ import { figureRows } from '@/components/figures/rows';
 import { Button } from '@/components/ui/Button';
 import { Dialog } from '@/components/ui/Dialog';
 import { WatchIcon } from '@/components/ui/icons';
-import { figures as texts } from '@/lib/text/en/board';
+import { header, figures as texts } from '@/lib/text/en/board';
 import { fill } from '@/lib/text/fill';
-import { useBoardState } from '../useBoard';
+import { useBoard, useBoardState } from '../useBoard';
 import { FigureCell } from './FigureCell';
 import { FigureExplained } from './FigureExplained';
 import { figureName, STRIP_IDS, type StripId } from './readings';
@@ -82,8 +82,48 @@ function Remarks() {
   );
 }
 
+/** What the figures count: theories that can be left out, to see what they do. */
+function Counted() {
+  const board = useBoard();
+  const corrections = useBoardState((state) => state.corrections);
+  return (
+    <fieldset className="flex flex-wrap items-center gap-x-4 gap-y-1 text-sm">
+      <legend className="float-left pr-2 text-ink-soft">{texts.counts}</legend>
+      {COUNTS.map(([key, name]) => (
+        <label key={key} className="flex min-h-6 items-center gap-1.5 bench:min-h-11">
+          <input
+            type="checkbox"
+            checked={corrections[key]}
+            onChange={(event) => board.setCorrections({ ...corrections, [key]: event.target.checked })}
+          />
+          {name}
+        </label>
+      ))}
+      <span className="text-xs text-ink-soft">{texts.countNote}</span>
+    </fieldset>
+  );
+}
+
+const COUNTS = [
+  ['bodies', texts.countBodies],
+  ['propellers', texts.countPropellers],
+] as const;
+
+/** Every figure of the draft under its heading, with its curves, in the units of the board. */
 function AllFigures() {
+  const board = useBoard();
   const settled = useBoardState((state) => state.settled);
+  const system = useBoardState((state) => state.system);
   if (settled === null) return <p>{texts.working}</p>;
-  return <FigureList rows={figureRows(settled)} />;
+  const other = system === 'metric' ? 'imperial' : 'metric';
+  const label = fill(header.units, { system: header[system], other: header[other] });
+  return (
+    <div className="grid grid-cols-1 gap-3">
+      <Button className="figure justify-self-start" aria-label={label} onClick={() => board.setSystem(other)}>
+        {header[system]}
+      </Button>
+      <Counted />
+      <FigureList rows={figureRows(settled, undefined, system)} charts={settled.charts} system={system} />
+    </div>
+  );
 }

@@ -7,7 +7,7 @@ import { QUANTITIES, shown, shownText, type UnitSystem } from '@/lib/units/quant
 
 /** Figures at the foot of the board, in the order in which a builder asks. */
 export const STRIP_IDS = [
-  'cgXMm',
+  'cgAtBodySideMm',
   'allUpMassG',
   'stallSpeedMs',
   'staticMarginPct',
@@ -15,7 +15,7 @@ export const STRIP_IDS = [
   'rollRatePerDeg',
   'wingAreaDm2',
   'macMm',
-  'neutralPointXMm',
+  'neutralPointPct',
 ] as const;
 export type StripId = (typeof STRIP_IDS)[number];
 
@@ -63,7 +63,7 @@ export function readingOf(id: StripId, figures: Figures | null, system: UnitSyst
   return {
     ...numberOf(figure.value, id, system),
     level: verdict?.level ?? null,
-    words: (id === 'cgXMm' ? cgInside(figures.marks, system) : null) ?? verdict?.words ?? '',
+    words: (id === 'cgAtBodySideMm' ? cgInside(figures.marks, system) : null) ?? verdict?.words ?? '',
     band: bandText(figure, id, system),
   };
 }

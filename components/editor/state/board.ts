@@ -1,4 +1,5 @@
 import { createStore, type StoreApi } from 'zustand/vanilla';
+import { ALL_COUNTED, type Corrections } from '@/lib/aero/corrections';
 import { setHandle } from '@/lib/airframe/handles';
 import type { Airframe } from '@/lib/airframe/schema/airframe';
 import type { DraftAnswer } from '@/lib/contract/answers';
@@ -29,6 +30,8 @@ export interface BoardState extends session.Session {
   readonly stop: { readonly handleId: string; readonly reason: string } | null;
   readonly save: SaveState;
   readonly system: UnitSystem;
+  /** What the figures count beside the lifting surfaces. */
+  readonly corrections: Corrections;
   /** A line about something that happened by itself. */
   readonly notice: string | null;
   /** What a person can do about saving; null while nothing is saved by itself. */
@@ -74,6 +77,8 @@ export interface Board {
   select(elementId: string): void;
   /** Units on this screen; the document keeps its millimetres. */
   setSystem(system: UnitSystem): void;
+  /** What the figures on this screen count; a release always counts everything. */
+  setCorrections(corrections: Corrections): void;
 }
 
 export interface BoardOptions {
@@ -92,6 +97,7 @@ const startState = ({ airframe, save, system }: BoardOptions): BoardState => ({
   stop: null,
   save,
   system,
+  corrections: ALL_COUNTED,
   notice: null,
   sync: null,
 });
@@ -158,5 +164,6 @@ export function createBoard(options: BoardOptions): Board {
     redo: () => settle(session.redoEdit(store.getState())),
     select: (elementId) => apply(session.select(store.getState(), elementId)),
     setSystem: (system) => store.setState({ system }),
+    setCorrections: (corrections) => store.setState({ corrections }),
   };
 }

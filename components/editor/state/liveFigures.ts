@@ -27,15 +27,18 @@ export function followFigures(
   });
   let asked: FiguresJob | null = null;
   const ask = (state: BoardState) => {
-    const job: FiguresJob = { airframe: current(state), depth: state.gesture === null ? 'full' : 'live' };
+    const { corrections, gesture } = state;
+    const job: FiguresJob = { airframe: current(state), depth: gesture === null ? 'full' : 'live', corrections };
     // Taking a handle without moving it is no reason to know less.
-    if (asked?.airframe === job.airframe && (asked.depth === 'full' || job.depth === 'live')) return;
+    const same = asked?.airframe === job.airframe && asked.corrections === corrections;
+    if (same && (asked?.depth === 'full' || job.depth === 'live')) return;
     asked = job;
     source.ask(job);
   };
   ask(store.getState());
   const leave = store.subscribe((state, before) => {
-    if (state.gesture !== before.gesture || state.history !== before.history) ask(state);
+    const changed = (['gesture', 'history', 'corrections'] as const).some((key) => state[key] !== before[key]);
+    if (changed) ask(state);
   });
   return () => {
     leave();

@@ -2,48 +2,52 @@ import { turnShares } from './hinge';
 import type { LaidStrip, Lattice, LatticeControl } from './types';
 
 // Right-hand sides: what the stream brings along each normal, per unit of angle, rate or deflection, with its sign turned. All are
-// linear about the stream along x, so any flight state is a sum of them. Rates are made dimensionless as p b / 2V, q c / 2V, r b / 2V.
+// linear about the stream along x, so any flight state is a sum of them.
 
 /** Columns of the symmetric problem, before the controls. */
 export const SYMMETRIC_CASES = ['base', 'alpha', 'pitchRate'] as const;
 /** Columns of the antisymmetric problem, before the controls. */
 export const ANTISYMMETRIC_CASES = ['beta', 'rollRate', 'yawRate'] as const;
 
-/** Right-hand sides of the symmetric problem, row-major: panels by cases, then one column a control. */
+/**
+ * Right-hand sides of the symmetric problem, row-major: panels by cases, then one column a control. The pitch rate is about the origin, in
+ * radians per length travelled; `derivativesAbout` moves it to the reference point.
+ */
 export function symmetricSides(lattice: Lattice, controls: readonly LatticeControl[]): Float64Array {
   const columns = SYMMETRIC_CASES.length + controls.length;
   const sides = new Float64Array(lattice.mirroredCount * columns);
-  const { point, chord } = lattice.reference;
   for (let i = 0; i < lattice.mirroredCount; i++) {
     const nx = lattice.normals[i * 3] ?? 0;
     const nz = lattice.normals[i * 3 + 2] ?? 0;
-    const x = (lattice.points[i * 3] ?? 0) - point[0];
-    const z = (lattice.points[i * 3 + 2] ?? 0) - point[2];
+    const x = lattice.points[i * 3] ?? 0;
+    const z = lattice.points[i * 3 + 2] ?? 0;
     sides[i * columns] = -nx;
     sides[i * columns + 1] = -nz;
-    // Nose up at unit q c / 2V: the air meets a place aft of the centre from below.
-    sides[i * columns + 2] = (-2 / chord) * (x * nz - z * nx);
+    // Nose going up: the air meets a place aft of the origin from below.
+    sides[i * columns + 2] = -(x * nz - z * nx);
   }
   writeControls(lattice, controls, sides, columns, SYMMETRIC_CASES.length, lattice.mirroredCount);
   return sides;
 }
 
-/** Right-hand sides of the antisymmetric problem. Control columns: starboard positive, port by the same amount negative. */
+/**
+ * Right-hand sides of the antisymmetric problem, rates likewise about the origin. Control columns: starboard positive, port by the same
+ * amount negative.
+ */
 export function antisymmetricSides(lattice: Lattice, controls: readonly LatticeControl[]): Float64Array {
   const columns = ANTISYMMETRIC_CASES.length + controls.length;
   const sides = new Float64Array(lattice.count * columns);
-  const { point, span } = lattice.reference;
   for (let i = 0; i < lattice.count; i++) {
     const nx = lattice.normals[i * 3] ?? 0;
     const ny = lattice.normals[i * 3 + 1] ?? 0;
     const nz = lattice.normals[i * 3 + 2] ?? 0;
-    const x = (lattice.points[i * 3] ?? 0) - point[0];
-    const y = (lattice.points[i * 3 + 1] ?? 0) - point[1];
-    const z = (lattice.points[i * 3 + 2] ?? 0) - point[2];
+    const x = lattice.points[i * 3] ?? 0;
+    const y = lattice.points[i * 3 + 1] ?? 0;
+    const z = lattice.points[i * 3 + 2] ?? 0;
     // Wind from starboard; right wing going down; nose going right.
     sides[i * columns] = ny;
-    sides[i * columns + 1] = (-2 / span) * (y * nz - z * ny);
-    sides[i * columns + 2] = (-2 / span) * (x * ny - y * nx);
+    sides[i * columns + 1] = -(y * nz - z * ny);
+    sides[i * columns + 2] = -(x * ny - y * nx);
   }
   writeControls(lattice, controls, sides, columns, ANTISYMMETRIC_CASES.length, lattice.count);
   return sides;

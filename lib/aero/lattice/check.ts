@@ -1,6 +1,7 @@
 import type { Problem } from '@/lib/numerics/result';
 import { CENTRE_PLANE_SHARE } from '@/lib/numerics/tolerances';
 import { texts } from '@/lib/text/en/figures';
+import { foldsOnItself, liesIn, slices } from './junctions';
 import { sectionLengths } from './stations';
 import type { LatticeSurface } from './types';
 
@@ -17,5 +18,32 @@ export function surfaceProblems(surface: LatticeSurface): Problem[] {
   const onCentre = sections.every((s) => Math.abs(s.le[1]) <= length * CENTRE_PLANE_SHARE);
   if (!mirrored && !onCentre) return bad('surface-one-sided', texts.problems.surfaceOneSided);
   if (mirrored && onCentre) return bad('surface-doubled', texts.problems.surfaceDoubled);
+  if (foldsOnItself(sections)) return [{ ...selfFolded, path: surface.id }];
   return [];
 }
+
+const selfFolded = {
+  code: 'surface-folds-on-itself',
+  message: texts.problems.foldsOnItself,
+  fix: texts.problems.foldsOnItselfFix,
+};
+
+/** What keeps two surfaces from being worked out side by side; the path is the later one's id. */
+export function pairProblems(surfaces: readonly LatticeSurface[]): Problem[] {
+  return surfaces.flatMap((later, i) =>
+    surfaces.slice(0, i).flatMap((earlier): Problem[] => {
+      if (liesIn(later, earlier) || liesIn(earlier, later)) return [coincident(later.id)];
+      if (!slices(earlier, later)) return [];
+      const { surfacesCross, surfacesCrossFix } = texts.problems;
+      return [{ code: 'surfaces-cross', path: later.id, message: surfacesCross, fix: surfacesCrossFix }];
+    }),
+  );
+}
+
+/** Two surfaces in one place. */
+export const coincident = (path: string): Problem => ({
+  code: 'coincident-surfaces',
+  path,
+  message: texts.problems.coincident,
+  fix: texts.problems.coincidentFix,
+});

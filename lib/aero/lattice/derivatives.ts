@@ -1,16 +1,22 @@
-import { factor, solve } from '@/lib/numerics/lu';
-import { type Problem, type Result, refuse } from '@/lib/numerics/result';
+import { type Result, refuse } from '@/lib/numerics/result';
 import { LEAST_LIFT_SLOPE } from '@/lib/numerics/tolerances';
-import { texts } from '@/lib/text/en/figures';
-import { ANTISYMMETRIC_CASES, antisymmetricSides, SYMMETRIC_CASES, symmetricSides } from './boundary';
-import { type AntisymmetricEffect, antisymmetricEffect, type SymmetricEffect, symmetricEffect } from './coefficients';
-import { assemble } from './influence';
-import { layLattice } from './lay';
-import type { Lattice, LatticeControl, LatticeInput } from './types';
+import { ANTISYMMETRIC_CASES, SYMMETRIC_CASES } from './boundary';
+import {
+  type AntisymmetricEffect,
+  type AntisymmetricSums,
+  antisymmetricEffect,
+  antisymmetricSums,
+  type SymmetricEffect,
+  type SymmetricSums,
+  symmetricEffect,
+  symmetricSums,
+} from './coefficients';
+import { type LatticeSolution, noLift, solveLattice } from './solve';
+import type { Lattice, LatticeInput, LatticeReference } from './types';
 
 /** All per radian, rates per q c / 2V, p b / 2V and r b / 2V; moments about the reference point. */
 export interface SymmetricDerivatives {
-  /** At no angle of attack: what incidence and twist lift and pitch. */
+  /** At no angle of attack: what incidence, twist and camber lift and pitch. */
   readonly base: SymmetricEffect;
   readonly alpha: SymmetricEffect;
   readonly pitchRate: SymmetricEffect;
@@ -18,8 +24,6 @@ export interface SymmetricDerivatives {
   readonly controls: ReadonlyMap<string, SymmetricEffect>;
   /** Where the lift due to angle of attack acts, along x. */
   readonly neutralPointX: number;
-  /** Vortex strengths over stream speed: row-major, panels by the cases base, alpha, pitchRate, then the controls. */
-  readonly circulation: Float64Array;
 }
 
 export interface AntisymmetricDerivatives {
@@ -32,6 +36,7 @@ export interface AntisymmetricDerivatives {
 
 export interface Derivatives {
   readonly lattice: Lattice;
+  readonly solution: LatticeSolution;
   readonly symmetric: SymmetricDerivatives;
   /** `null` when it was not asked for. */
   readonly antisymmetric: AntisymmetricDerivatives | null;
@@ -39,79 +44,67 @@ export interface Derivatives {
 
 /**
  * Stability and control derivatives of the whole configuration, about the undisturbed stream along x: no compressibility, no
- * stall, no thickness, no wake relaxation, no alpha-dot term; roll and yaw terms that grow with lift (the sweep's part of the
- * rolling moment in sideslip, yaw by roll rate) are left out.
+ * stall, no thickness, no wake relaxation, no alpha-dot term. What grows with lift in roll and yaw is in lateral.ts.
  * Problems: what the lattice refuses, surfaces that coincide, a configuration without lift.
  */
 export function derivatives(input: LatticeInput, depth: 'symmetric' | 'both'): Result<Derivatives> {
-  const laid = layLattice(input);
-  if (!laid.ok) return laid;
-  const lattice = laid.value;
-  if (lattice.mirroredCount === 0) return refuse(noLift);
-  const { symmetric, antisymmetric } = assemble(lattice, depth === 'both');
-  const symmetricFactors = factor(symmetric, lattice.mirroredCount);
-  if (!symmetricFactors.ok) return refuse(coincident);
-  const controls = input.controls;
-  const pitching = controls.filter((c) => input.surfaces.some((s) => s.id === c.surfaceId && s.mirrored));
-  const circulation = symmetricSides(lattice, pitching);
-  solve(symmetricFactors.value, circulation, SYMMETRIC_CASES.length + pitching.length);
-  const inSymmetry = symmetricSet(lattice, pitching, circulation);
-  if (!(inSymmetry.alpha.lift > LEAST_LIFT_SLOPE)) return refuse(noLift);
-  if (!antisymmetric) return { ok: true, value: { lattice, symmetric: inSymmetry, antisymmetric: null } };
-  const factors = factor(antisymmetric, lattice.count);
-  if (!factors.ok) return refuse(coincident);
-  const strengths = antisymmetricSides(lattice, controls);
-  solve(factors.value, strengths, ANTISYMMETRIC_CASES.length + controls.length);
-  return {
-    ok: true,
-    value: { lattice, symmetric: inSymmetry, antisymmetric: antisymmetricSet(lattice, controls, strengths) },
-  };
+  const solved = solveLattice(input, depth);
+  return solved.ok ? derivativesAbout(solved.value, input.reference) : solved;
 }
 
-const noLift: Problem = {
-  code: 'no-lifting-surface',
-  path: 'surfaces',
-  message: texts.problems.noLift,
-  fix: texts.problems.noLiftFix,
-};
-
-const coincident: Problem = {
-  code: 'coincident-surfaces',
-  path: 'surfaces',
-  message: texts.problems.coincident,
-  fix: texts.problems.coincidentFix,
-};
+/** The same of a lattice that is solved already: only sums are left. Refused when nothing lifts. */
+export function derivativesAbout(solution: LatticeSolution, reference: LatticeReference): Result<Derivatives> {
+  const symmetric = symmetricSet(solution, reference);
+  if (!(symmetric.alpha.lift > LEAST_LIFT_SLOPE)) return refuse(noLift);
+  const antisymmetric = solution.antisymmetric ? antisymmetricSet(solution, solution.antisymmetric, reference) : null;
+  return { ok: true, value: { lattice: solution.lattice, solution, symmetric, antisymmetric } };
+}
 
 function symmetricSet(
-  lattice: Lattice,
-  controls: readonly LatticeControl[],
-  circulation: Float64Array,
+  { lattice, symmetric, pitching }: LatticeSolution,
+  reference: LatticeReference,
 ): SymmetricDerivatives {
-  const columns = SYMMETRIC_CASES.length + controls.length;
-  const effect = (column: number) => symmetricEffect(lattice, circulation, columns, column);
-  const alpha = effect(1);
-  const { point, chord } = lattice.reference;
+  const columns = SYMMETRIC_CASES.length + pitching.length;
+  const [base = NONE, alpha = NONE, turn = NONE, ...controls] = symmetricSums(lattice, symmetric, columns);
+  const effect = (sums: SymmetricSums) => symmetricEffect(sums, reference);
+  const { point, chord } = reference;
+  // About a place aft of the origin, turning also lets it sink; about one above, it moves it back.
+  const rate = (pick: keyof SymmetricSums) =>
+    (2 / chord) * (turn[pick] - point[0] * alpha[pick] + point[2] * base[pick]);
+  const inAlpha = effect(alpha);
   return {
-    base: effect(0),
-    alpha,
-    pitchRate: effect(2),
-    controls: new Map(controls.map((c, k) => [c.id, effect(SYMMETRIC_CASES.length + k)])),
-    neutralPointX: point[0] - (alpha.pitch / alpha.lift) * chord,
-    circulation,
+    base: effect(base),
+    alpha: inAlpha,
+    pitchRate: effect({ lift: rate('lift'), moment: rate('moment') }),
+    controls: new Map(pitching.map((c, k) => [c.id, effect(controls[k] ?? NONE)])),
+    neutralPointX: point[0] - (inAlpha.pitch / inAlpha.lift) * chord,
   };
 }
 
+const NONE: SymmetricSums = { lift: 0, moment: 0 };
+
 function antisymmetricSet(
-  lattice: Lattice,
-  controls: readonly LatticeControl[],
-  strengths: Float64Array,
+  { lattice, controls }: LatticeSolution,
+  circulation: Float64Array,
+  reference: LatticeReference,
 ): AntisymmetricDerivatives {
   const columns = ANTISYMMETRIC_CASES.length + controls.length;
-  const effect = (column: number) => antisymmetricEffect(lattice, strengths, columns, column);
+  const [beta = STILL, roll = STILL, yaw = STILL, ...turned] = antisymmetricSums(lattice, circulation, columns);
+  const effect = (sums: AntisymmetricSums) => antisymmetricEffect(sums, reference);
+  const [rollMix, yawMix] = rateMixes(reference);
+  const mixed = (rate: AntisymmetricSums, mix: number) => {
+    const of = (pick: keyof AntisymmetricSums) => (2 / reference.span) * (rate[pick] + mix * beta[pick]);
+    return effect({ side: of('side'), roll: of('roll'), yaw: of('yaw') });
+  };
   return {
-    beta: effect(0),
-    rollRate: effect(1),
-    yawRate: effect(2),
-    controls: new Map(controls.map((c, k) => [c.id, effect(ANTISYMMETRIC_CASES.length + k)])),
+    beta: effect(beta),
+    rollRate: mixed(roll, rollMix),
+    yawRate: mixed(yaw, yawMix),
+    controls: new Map(controls.map((c, k) => [c.id, effect(turned[k] ?? STILL)])),
   };
 }
+
+const STILL: AntisymmetricSums = { side: 0, roll: 0, yaw: 0 };
+
+/** How much sideslip a roll and a yaw about the reference point hold against the same about the origin, per unit of the rate. */
+export const rateMixes = ({ point }: LatticeReference): readonly [roll: number, yaw: number] => [-point[2], point[0]];

@@ -1,3 +1,4 @@
+import type { Vec3 } from '@/lib/numerics/vec';
 import type { LaidSurface, Lattice } from './types';
 
 // What each vortex of unit strength does at each control point, along its normal. Horseshoes: a bound part on the quarter line of
@@ -40,6 +41,32 @@ export function assemble(lattice: Lattice, withAntisymmetric: boolean): Influenc
   return { symmetric, antisymmetric };
 }
 
+/**
+ * The velocity along a direction that a symmetric load brings at any place off the surfaces.
+ * @param circulation of the panels of mirrored surfaces: row-major, `columns` wide, of which `column` is meant
+ */
+export function symmetricFlow(
+  lattice: Lattice,
+  circulation: Float64Array,
+  columns: number,
+  column: number,
+): (at: Vec3, along: Vec3) => number {
+  const legs = legTable(lattice);
+  const count = lattice.mirroredCount;
+  const own = new Float64Array(lattice.count);
+  const image = new Float64Array(lattice.count);
+  return ([x, y, z], [nx, ny, nz]) => {
+    influenceAt(lattice, legs, placeOff(x, y, z, nx, ny, nz), count, own);
+    // On the centre plane a vortex and its image do the same.
+    const central = y === 0 && ny === 0;
+    if (!central) influenceAt(lattice, legs, placeOff(x, -y, z, nx, -ny, nz), count, image);
+    const other = central ? own : image;
+    let sum = 0;
+    for (let j = 0; j < count; j++) sum += ((own[j] ?? 0) + (other[j] ?? 0)) * (circulation[j * columns + column] ?? 0);
+    return sum;
+  };
+}
+
 /** Of each edge: square of the core radius that other surfaces feel, and the normal there. */
 interface LegTable {
   readonly coreSquare: Float64Array;
@@ -72,17 +99,27 @@ function legTable({ surfaces, options, edgeY }: Lattice): LegTable {
 /** A control point, or its mirror image, with the normals there. */
 interface Probe {
   readonly family: number;
+  readonly touches: ReadonlySet<number>;
   readonly x: number;
   readonly y: number;
   readonly z: number;
   readonly nx: number;
   readonly ny: number;
   readonly nz: number;
+  /** Half the width of the strip it stands for; 0 for a place on no surface. */
+  readonly half: number;
 }
 
-function probe({ points, normals }: Lattice, { family }: LaidSurface, i: number, side: 1 | -1): Probe {
+function probe(
+  { points, normals }: Lattice,
+  { family, touches, strips, firstPanel, rows }: LaidSurface,
+  i: number,
+  side: 1 | -1,
+): Probe {
   return {
     family,
+    touches,
+    half: (strips[Math.floor((i - firstPanel) / rows)]?.width ?? 0) / 2,
     x: points[i * 3] ?? 0,
     y: side * (points[i * 3 + 1] ?? 0),
     z: points[i * 3 + 2] ?? 0,
@@ -91,6 +128,21 @@ function probe({ points, normals }: Lattice, { family }: LaidSurface, i: number,
     nz: normals[i * 3 + 2] ?? 0,
   };
 }
+
+const NO_NEIGHBOURS: ReadonlySet<number> = new Set();
+
+/** A place on no surface: every leg is felt with its core. Written like `probe`, so that one shape of object runs through the loops. */
+const placeOff = (x: number, y: number, z: number, nx: number, ny: number, nz: number): Probe => ({
+  family: -1,
+  touches: NO_NEIGHBOURS,
+  half: 0,
+  x,
+  y,
+  z,
+  nx,
+  ny,
+  nz,
+});
 
 /** Velocity along the normal at the probe by each of the first `count` vortices, into `out`. */
 function influenceAt(lattice: Lattice, legs: LegTable, at: Probe, count: number, out: Float64Array): void {
@@ -108,15 +160,16 @@ function tableLegs({ edgeY, edgeZ, cornerX, options }: Lattice, legs: LegTable, 
   const { x, y, z, ny, nz } = at;
   const { rows } = source;
   const other = source.family !== at.family;
+  // Where surfaces meet at an angle their edges are laid together, and a core would part them.
+  const meets = at.touches.has(source.index);
   for (let k = 0; k <= source.strips.length; k++) {
     const edge = source.firstEdge + k;
     const dy = y - (edgeY[edge] ?? 0);
     const dz = z - (edgeZ[edge] ?? 0);
     const square = dy * dy + dz * dz;
-    const cored = other && Math.abs(ny * (legs.ny[edge] ?? 0) + nz * (legs.nz[edge] ?? 0)) > options.parallel;
-    const softened = square + (cored ? (legs.coreSquare[edge] ?? 0) : 0);
-    // A point in line with a leg feels nothing of it.
-    const turn = softened > 0 ? (nz * dy - ny * dz) / softened : 0;
+    const parallel = Math.abs(ny * (legs.ny[edge] ?? 0) + nz * (legs.nz[edge] ?? 0)) > options.parallel;
+    const cored = other && (parallel || !meets);
+    const turn = cored ? meanTurn(at, dy, dz, legs.coreSquare[edge] ?? 0) : turnAt(at, dy, dz, 0);
     for (let corner = k * rows; corner < (k + 1) * rows; corner++) {
       const dx = x - (cornerX[source.firstCorner + corner] ?? 0);
       const distance = Math.sqrt(dx * dx + square);
@@ -124,6 +177,26 @@ function tableLegs({ edgeY, edgeZ, cornerX, options }: Lattice, legs: LegTable, 
       legs.leg[corner] = distance > 0 ? turn * (1 + dx / distance) : 0;
     }
   }
+}
+
+/** What a straight vortex along x turns at a place beside it; in line with it, nothing. */
+function turnAt({ ny, nz }: Probe, dy: number, dz: number, coreSquare: number): number {
+  const square = dy * dy + dz * dz + coreSquare;
+  return square > 0 ? (nz * dy - ny * dz) / square : 0;
+}
+
+/**
+ * The same as the mean over the width of the strip: a leg of another surface may pass anywhere beside a control point, and what it does
+ * at that one point says little of the strip.
+ */
+function meanTurn(at: Probe, dy: number, dz: number, coreSquare: number): number {
+  const { half, ny, nz } = at;
+  if (half === 0 || coreSquare === 0) return turnAt(at, dy, dz, coreSquare);
+  const hy = half * nz;
+  const hz = -half * ny;
+  const outer = (dy + hy) ** 2 + (dz + hz) ** 2 + coreSquare;
+  const inner = (dy - hy) ** 2 + (dz - hz) ** 2 + coreSquare;
+  return Math.log(outer / inner) / (4 * half);
 }
 
 /** A bound vortex seen from closer to its line than this share of its corners' distances: the point lies on it, and feels nothing. */

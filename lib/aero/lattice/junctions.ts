@@ -4,9 +4,9 @@ import type { LatticeSection, LatticeSurface } from './types';
 // Where the end of one surface meets another: such an end carries no tip vortex, and the strips of both should begin there.
 
 export interface Junction {
-  /** The surface whose end it is. */
+  /** The surface whose end it is, or that passes through the other. */
   readonly of: number;
-  readonly end: 'root' | 'tip';
+  readonly end: 'root' | 'tip' | 'through';
   /** The surface that is met, and where: a length from its root. */
   readonly on: number;
   readonly at: number;
@@ -32,14 +32,88 @@ export function junctions(surfaces: readonly LatticeSurface[]): Junction[] {
       }
     }
   }
-  return found;
+  return [...found, ...crossings(surfaces, found)];
 }
 
-function meets(end: LatticeSection, sections: readonly LatticeSection[]): { at: number; endToEnd: boolean } | null {
+/** Where surfaces pass through each other away from their ends, e.g. a fin that reaches below the tail it is slotted to. */
+function crossings(surfaces: readonly LatticeSurface[], ends: readonly Junction[]): Junction[] {
+  return surfaces.flatMap((a, i) =>
+    surfaces.slice(i + 1).flatMap((b, offset): Junction[] => {
+      const j = i + 1 + offset;
+      if (ends.some(({ of, on }) => (of === i && on === j) || (of === j && on === i))) return [];
+      const at = crossing(a.sections, b.sections);
+      if (!at) return [];
+      return [
+        { of: i, end: 'through', on: j, at: at[1], endToEnd: false },
+        { of: j, end: 'through', on: i, at: at[0], endToEnd: false },
+      ];
+    }),
+  );
+}
+
+/** Lengths at which two surfaces cross in the front view where their chords overlap; null when they do not. */
+function crossing(a: readonly LatticeSection[], b: readonly LatticeSection[]): [number, number] | null {
+  const [alongA, alongB] = [sectionLengths(a), sectionLengths(b)];
+  for (let i = 1; i < a.length; i++)
+    for (let j = 1; j < b.length; j++) {
+      const [a0, a1, b0, b1] = [a[i - 1]?.le, a[i]?.le, b[j - 1]?.le, b[j]?.le];
+      if (!a0 || !a1 || !b0 || !b1) continue;
+      const [ay, az, by, bz] = [a1[1] - a0[1], a1[2] - a0[2], b1[1] - b0[1], b1[2] - b0[2]];
+      const turn = ay * bz - az * by;
+      if (turn === 0) continue;
+      const s = ((b0[1] - a0[1]) * bz - (b0[2] - a0[2]) * by) / turn;
+      const t = ((b0[1] - a0[1]) * az - (b0[2] - a0[2]) * ay) / turn;
+      if (!(s > 0 && s < 1 && t > 0 && t < 1)) continue;
+      const [from, to] = [alongA[i - 1] ?? 0, alongB[j - 1] ?? 0];
+      const at: [number, number] = [from + s * ((alongA[i] ?? 0) - from), to + t * ((alongB[j] ?? 0) - to)];
+      const [cutA, cutB] = [cutAt(a, alongA, at[0]), cutAt(b, alongB, at[1])];
+      if (cutA.le[0] < cutB.le[0] + cutB.chord && cutB.le[0] < cutA.le[0] + cutA.chord) return at;
+    }
+  return null;
+}
+
+/**
+ * The surfaces with each end that stands on another moved, in the front view, onto it: a slot's depth or a sheet's thickness must not leave
+ * a sliver that air could pass. Of two ends that stand on each other the shorter surface's moves. An end whose surface would lose more
+ * than a tenth of its length by it stays.
+ */
+export function joined(surfaces: readonly LatticeSurface[], met: readonly Junction[]): LatticeSurface[] {
+  const longs = surfaces.map(({ sections }) => sectionLengths(sections).at(-1) ?? 0);
+  return surfaces.map((surface, index) => {
+    let sections = [...surface.sections];
+    for (const { of, end, on, at } of met) {
+      const other = surfaces[on]?.sections;
+      if (of !== index || end === 'through' || !other) continue;
+      const mutual = met.some((back) => back.of === on && back.on === index && back.end !== 'through');
+      if (mutual && (longs[on] ?? 0) <= (longs[index] ?? 0)) continue;
+      const k = end === 'root' ? 0 : sections.length - 1;
+      const [, y, z] = cutAt(other, sectionLengths(other), at).le;
+      const moved = sections.map((section, i) =>
+        i === k ? { ...section, le: [section.le[0], surface.mirrored ? y : section.le[1], z] as const } : section,
+      );
+      if ((sectionLengths(moved).at(-1) ?? 0) > KEPT_LENGTH * (longs[index] ?? 0)) sections = moved;
+    }
+    return { ...surface, sections };
+  });
+}
+
+/** Least share of its length that a surface keeps when its end is moved onto another. */
+const KEPT_LENGTH = 0.9;
+
+/** For each surface, those that it touches. */
+export function neighbours(surfaces: readonly LatticeSurface[], met: readonly Junction[]): ReadonlySet<number>[] {
+  return surfaces.map((_, i) => new Set(met.flatMap(({ of, on }) => (of === i ? [on] : on === i ? [of] : []))));
+}
+
+function meets(
+  end: LatticeSection,
+  sections: readonly LatticeSection[],
+  gap = end.chord * STANDS_ON,
+): { at: number; endToEnd: boolean } | null {
   const lengths = sectionLengths(sections);
   const total = lengths[lengths.length - 1] ?? 0;
   const nearest = nearestLength(end, sections, lengths);
-  if (nearest.distance > end.chord * STANDS_ON) return null;
+  if (nearest.distance > gap) return null;
   const there = cutAt(sections, lengths, nearest.at);
   const overlap = Math.min(end.le[0] + end.chord, there.le[0] + there.chord) - Math.max(end.le[0], there.le[0]);
   if (overlap <= 0) return null;
@@ -66,6 +140,63 @@ function nearestLength(end: LatticeSection, sections: readonly LatticeSection[],
   }
   return best;
 }
+
+/** Two sheets closer than this share of the chord lie in one place. */
+const ONE_PLACE = 1e-3;
+/** Surfaces that cross at less than this angle slice each other lengthwise. Common practice, no source. */
+const SLICING_RAD = Math.PI / 9;
+
+/** True when one surface lies within another from end to end, so that their lift cannot be told apart. */
+export function liesIn({ sections }: LatticeSurface, other: LatticeSurface): boolean {
+  const [root, tip] = [sections[0], sections.at(-1)];
+  if (!root || !tip) return false;
+  return [root, tip].every((end) => meets(end, other.sections, ONE_PLACE * Math.max(root.chord, tip.chord)) !== null);
+}
+
+/**
+ * True when one stretch of a surface comes back over another, in the front view: crossing it, or closer than a twentieth of its chord. A
+ * stretch may bend at most to a right angle and a half from the one before it.
+ */
+export function foldsOnItself(sections: readonly LatticeSection[]): boolean {
+  const runs = sections.slice(1).flatMap((outer, i) => {
+    const inner = sections[i];
+    const long = inner ? Math.hypot(outer.le[1] - inner.le[1], outer.le[2] - inner.le[2]) : 0;
+    return inner && long > 0 ? [{ inner, outer, long }] : [];
+  });
+  return runs.some((run, i) => {
+    const before = runs[i - 1];
+    if (before && bendCosine(before, run) < SHARPEST_BEND) return true;
+    return runs.slice(0, Math.max(0, i - 1)).some((earlier) => touches(earlier, run));
+  });
+}
+
+/** Cosine of the sharpest bend between neighbouring stretches: 135 degrees. */
+const SHARPEST_BEND = Math.cos((3 * Math.PI) / 4);
+
+interface Stretch {
+  readonly inner: LatticeSection;
+  readonly outer: LatticeSection;
+  readonly long: number;
+}
+
+function bendCosine(a: Stretch, b: Stretch): number {
+  const along = (s: Stretch, axis: 1 | 2) => s.outer.le[axis] - s.inner.le[axis];
+  return (along(a, 1) * along(b, 1) + along(a, 2) * along(b, 2)) / (a.long * b.long);
+}
+
+/** True when a stretch crosses one that is not its neighbour, or has an end beside it: not beyond its ends, where a wing goes on. */
+function touches(a: Stretch, b: Stretch): boolean {
+  const sections = [a.inner, a.outer];
+  const beside = [b.inner, b.outer].some((end) => {
+    const { at, distance } = nearestLength(end, sections, [0, a.long]);
+    return distance <= end.chord * STANDS_ON && at > 0 && at < a.long;
+  });
+  return beside || crossing(sections, [b.inner, b.outer]) !== null;
+}
+
+/** True when two surfaces cross nearly flat to each other. */
+export const slices = (a: LatticeSurface, b: LatticeSurface): boolean =>
+  Math.abs(Math.sin(rollOf(a) - rollOf(b))) < Math.sin(SLICING_RAD) && crossing(a.sections, b.sections) !== null;
 
 /** Surfaces that continue each other, end to end and nearly parallel, count as one: the same number for each. */
 export function families(surfaces: readonly LatticeSurface[], met: readonly Junction[]): number[] {

@@ -275,6 +275,70 @@ describe('what cannot be worked out', () => {
   ] as const)('%s', (_, surfaces, expected) => expect(code(surfaces)).toBe(expected));
 
   it('two surfaces in the same place', () => {
-    expect(code([WING, { ...WING, id: 'again' }])).toBe('coincident-surfaces surfaces');
+    expect(code([WING, { ...WING, id: 'again' }])).toBe('coincident-surfaces again');
+    const part = { ...WING, id: 'part', sections: [section(20, 100, 4 / 2.8, 90), section(30, 250, 10 / 2.8, 80)] };
+    expect(code([WING, part])).toBe('coincident-surfaces part');
+  });
+
+  it('panels of one surface that come back over each other, or turn back on the spot', () => {
+    const folded = (points: readonly (readonly [number, number])[]) => ({
+      ...WING,
+      sections: points.map(([y, z]) => section(0, y, z, 200)),
+    });
+    expect(
+      code([
+        folded([
+          [0, 0],
+          [300, 0],
+          [300, 150],
+          [300, 10],
+        ]),
+      ]),
+    ).toBe('surface-folds-on-itself wing');
+    expect(
+      code([
+        folded([
+          [0, 0],
+          [300, 0],
+          [350, 200],
+          [150, 200],
+          [200, -50],
+        ]),
+      ]),
+    ).toBe('surface-folds-on-itself wing');
+    expect(
+      code([
+        folded([
+          [0, 0],
+          [260, -150],
+          [265, 150],
+        ]),
+      ]),
+    ).toBe('solved');
+    expect(
+      code([
+        folded([
+          [0, 0],
+          [300, 0],
+          [300, 120],
+        ]),
+      ]),
+    ).toBe('solved');
+  });
+
+  it('more surfaces than anyone flies', () => {
+    const many = Array.from({ length: 80 }, (_, k) => ({
+      ...WING,
+      id: `w${k}`,
+      sections: WING.sections.map((s) => ({ ...s, le: [s.le[0], s.le[1], s.le[2] + 200 * k] as Vec3 })),
+    }));
+    expect(code(many)).toBe('lattice-too-large surfaces');
+  });
+
+  it('a surface that slices lengthwise through another, but not a fin slotted through it', () => {
+    const cutting = { ...WING, id: 'cutting', sections: [section(0, 0, -20, 200), section(10, 500, 60, 150)] };
+    expect(code([WING, cutting])).toBe('surfaces-cross cutting');
+    const slotted = { ...FIN, mirrored: true, sections: [section(640, 150, 5, 120), section(660, 150, 120, 80)] };
+    expect(derivatives({ surfaces: [WING, TAIL, slotted], controls: [], reference: REFERENCE }, 'both').ok).toBe(true);
   });
 });

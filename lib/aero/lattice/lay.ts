@@ -1,21 +1,44 @@
-import { type Result, refuse } from '@/lib/numerics/result';
-import { surfaceProblems } from './check';
-import { families, junctions } from './junctions';
+import { type Problem, type Result, refuse } from '@/lib/numerics/result';
+import { texts } from '@/lib/text/en/figures';
+import { fill } from '@/lib/text/fill';
+import { pairProblems, surfaceProblems } from './check';
+import { turnShares } from './hinge';
+import { families, joined, junctions, neighbours } from './junctions';
 import { sectionRuns } from './stations';
 import { layStrips } from './strips';
-import { LATTICE_DEFAULTS, type LaidStrip, type LaidSurface, type Lattice, type LatticeInput } from './types';
+import {
+  LATTICE_DEFAULTS,
+  type LaidStrip,
+  type LaidSurface,
+  type Lattice,
+  type LatticeProblem,
+  type MeanLine,
+} from './types';
+
+/** Panels that are still solved in a few seconds: fifteen times what an aircraft of this kind needs. */
+const MOST_PANELS = 2000;
+
+const tooLarge = (count: number): Problem => ({
+  code: 'lattice-too-large',
+  path: 'surfaces',
+  message: fill(texts.problems.latticeTooLarge, { count, most: MOST_PANELS }),
+  fix: texts.problems.latticeTooLargeFix,
+});
 
 /**
  * Lays the lattice: rows of equal share of the chord, strips of nearly equal width, breaks at panel ends, control ends and
  * junctions, a quarter-strip inset at free tips. A surface without length or chord, or one that neither is a starboard half nor
  * stands on the centre plane, is a problem whose path is the surface's id.
  */
-export function layLattice(input: LatticeInput): Result<Lattice> {
+export function layLattice(input: LatticeProblem): Result<Lattice> {
   const options = { ...LATTICE_DEFAULTS, ...input.options };
-  const surfaces = [...input.surfaces.filter((s) => s.mirrored), ...input.surfaces.filter((s) => !s.mirrored)];
-  const problems = surfaces.flatMap(surfaceProblems);
+  const given = [...input.surfaces.filter((s) => s.mirrored), ...input.surfaces.filter((s) => !s.mirrored)];
+  const problems = given.flatMap(surfaceProblems);
+  if (problems.length === 0) problems.push(...pairProblems(given));
   if (problems.length > 0) return refuse(...problems);
-  const met = junctions(surfaces);
+  const met = junctions(given);
+  const surfaces = joined(given, met);
+  const touched = neighbours(surfaces, met);
   const family = families(surfaces, met);
   const laid: LaidSurface[] = [];
   const size = { panels: 0, edges: 0, corners: 0 };
@@ -24,7 +47,9 @@ export function layLattice(input: LatticeInput): Result<Lattice> {
       const strips = layStrips(surface, index, run, input.controls, met, options);
       laid.push({
         input: surface,
+        index,
         family: family[index] ?? index,
+        touches: touched[index] ?? new Set(),
         rows: surface.rows,
         strips,
         firstPanel: size.panels,
@@ -36,8 +61,8 @@ export function layLattice(input: LatticeInput): Result<Lattice> {
       size.corners += (strips.length + 1) * surface.rows;
     }
   }
+  if (size.panels > MOST_PANELS) return refuse(tooLarge(size.panels));
   const lattice: Lattice = {
-    reference: input.reference,
     options,
     surfaces: laid,
     mirroredCount: laid.reduce((sum, s) => sum + (s.input.mirrored ? s.strips.length * s.rows : 0), 0),
@@ -71,10 +96,11 @@ function placeSurface(lattice: Lattice, surface: LaidSurface): void {
 }
 
 function placeStrip(lattice: Lattice, { inner, outer, ny, nz }: LaidStrip, first: number, rows: number): void {
-  const incidence = (inner.incidenceRad + outer.incidenceRad) / 2;
   const chord = (inner.chord + outer.chord) / 2;
+  const slopes = rowSlopes(rows, inner.meanLine, outer.meanLine);
   for (let r = 0; r < rows; r++) {
     const i = (first + r) * 3;
+    const incidence = (inner.incidenceRad + outer.incidenceRad) / 2 - Math.atan(slopes[r] ?? 0);
     lattice.points[i] = (inner.le[0] + outer.le[0]) / 2 + (chord * (r + 0.75)) / rows;
     lattice.points[i + 1] = (inner.le[1] + outer.le[1]) / 2;
     lattice.points[i + 2] = (inner.le[2] + outer.le[2]) / 2;
@@ -82,4 +108,14 @@ function placeStrip(lattice: Lattice, { inner, outer, ny, nz }: LaidStrip, first
     lattice.normals[i + 1] = ny * Math.cos(incidence);
     lattice.normals[i + 2] = nz * Math.cos(incidence);
   }
+}
+
+/** Slope of the mean line at each row, so that in two dimensions its lift is that of thin-aerofoil theory: each kink turns like a hinge. */
+function rowSlopes(rows: number, ...lines: readonly (MeanLine | undefined)[]): Float64Array {
+  const slopes = new Float64Array(rows);
+  for (const line of lines)
+    for (const { at, slope } of line ?? [])
+      for (const [r, share] of turnShares(rows, 1 - at).entries())
+        slopes[r] = (slopes[r] ?? 0) + (share * slope) / lines.length;
+  return slopes;
 }

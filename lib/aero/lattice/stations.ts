@@ -1,5 +1,5 @@
 import { STRAIGHT_SHARE } from '@/lib/numerics/tolerances';
-import type { LatticeSection } from './types';
+import type { LatticeSection, MeanLine } from './types';
 
 // Places along a surface: its length runs along the panels as the front view shows them.
 
@@ -29,7 +29,18 @@ export function cutAt(sections: readonly LatticeSection[], lengths: readonly num
     le: [a.le[0] + (b.le[0] - a.le[0]) * t, a.le[1] + (b.le[1] - a.le[1]) * t, a.le[2] + (b.le[2] - a.le[2]) * t],
     chord: a.chord + (b.chord - a.chord) * t,
     incidenceRad: a.incidenceRad + (b.incidenceRad - a.incidenceRad) * t,
+    ...(a.meanLine && b.meanLine ? { meanLine: between(a.meanLine, b.meanLine, t) } : {}),
   };
+}
+
+/** A mean line between two: place and slope of each kink run straight when both ends have the same; otherwise both lines, in parts. */
+function between(a: MeanLine, b: MeanLine, t: number): MeanLine {
+  const mixed = (line: MeanLine, share: number) => line.map(({ at, slope }) => ({ at, slope: slope * share }));
+  if (a.length !== b.length) return [...mixed(a, 1 - t), ...mixed(b, t)];
+  return a.map((kink, i) => {
+    const other = b[i] ?? kink;
+    return { at: kink.at + (other.at - kink.at) * t, slope: kink.slope + (other.slope - kink.slope) * t };
+  });
 }
 
 /** Sections that follow each other without a step; a step in chord at a joint between panels begins a new run. */
@@ -61,8 +72,8 @@ function withoutStraight(sections: readonly LatticeSection[], lengths: readonly 
     const before = previous === undefined ? undefined : sections[previous];
     const next = sections[i + 1];
     if (before && next && previous !== undefined) {
-      const between = cutAt([before, next], [lengths[previous] ?? 0, lengths[i + 1] ?? 0], lengths[i] ?? 0);
-      if (sameSection(between, section, tolerance)) continue;
+      const straight = cutAt([before, next], [lengths[previous] ?? 0, lengths[i + 1] ?? 0], lengths[i] ?? 0);
+      if (sameSection(straight, section, tolerance)) continue;
     }
     kept.push(i);
   }
@@ -74,6 +85,19 @@ function sameSection(a: LatticeSection, b: LatticeSection, tolerance: number): b
   return (
     apart <= tolerance &&
     Math.abs(a.chord - b.chord) <= tolerance &&
-    Math.abs(a.incidenceRad - b.incidenceRad) <= STRAIGHT_SHARE
+    Math.abs(a.incidenceRad - b.incidenceRad) <= STRAIGHT_SHARE &&
+    sameMeanLine(a.meanLine ?? [], b.meanLine ?? [])
   );
 }
+
+/** True when two mean lines have the same kinks. */
+export const sameMeanLine = (a: MeanLine, b: MeanLine): boolean =>
+  a.length === b.length &&
+  a.every(({ at, slope }, i) => {
+    const other = b[i];
+    return (
+      other !== undefined &&
+      Math.abs(other.at - at) <= STRAIGHT_SHARE &&
+      Math.abs(other.slope - slope) <= STRAIGHT_SHARE
+    );
+  });

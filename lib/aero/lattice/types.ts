@@ -3,12 +3,23 @@ import type { Vec3 } from '@/lib/numerics/vec';
 // What goes into the vortex lattice: plain data, so that a published planform can be fed in as it is printed.
 // Axes: x aft, y to starboard, z up; any one unit of length throughout. Angles in radians.
 
+/** A change in the slope of a mean line, as seen from the leading edge: dz/dx, positive when the line turns up. */
+export interface Kink {
+  /** Share of the chord. */
+  readonly at: number;
+  readonly slope: number;
+}
+
+/** Camber as the lattice takes it: the line midway between the faces as straight stretches. Empty for a flat plate. */
+export type MeanLine = readonly Kink[];
+
 /** A chordwise cut of a surface. The lattice lies along x from `le`; incidence and camber turn the normals only. */
 export interface LatticeSection {
   readonly le: Vec3;
   readonly chord: number;
   /** Leading edge up is positive. */
   readonly incidenceRad: number;
+  readonly meanLine?: MeanLine;
 }
 
 export interface LatticeSurface {
@@ -50,7 +61,8 @@ export interface LatticeOptions {
    * Journal of Aircraft 10 (1973): a quarter.
    */
   readonly tipInset: number;
-  /** Radius of the core of a trailing leg, in strip widths, as another, nearly parallel surface feels it. Own tests: 0.3. */
+  /** Radius of the core of a trailing leg, in strip widths, as a surface feels it that does not meet the leg's at an angle. Own tests: 0.15, with
+   * what the leg does taken as the mean over the strip it passes. */
   readonly coreShare: number;
   /** Normals whose product is larger count as nearly parallel. */
   readonly parallel: number;
@@ -58,13 +70,22 @@ export interface LatticeOptions {
   readonly alignJunctions: boolean;
 }
 
-export const LATTICE_DEFAULTS: LatticeOptions = { tipInset: 0.25, coreShare: 0.3, parallel: 0.7, alignJunctions: true };
+export const LATTICE_DEFAULTS: LatticeOptions = {
+  tipInset: 0.25,
+  coreShare: 0.15,
+  parallel: 0.7,
+  alignJunctions: true,
+};
 
-export interface LatticeInput {
+/** What is solved: geometry and controls. What coefficients are measured by comes later, and costs nothing to change. */
+export interface LatticeProblem {
   readonly surfaces: readonly LatticeSurface[];
   readonly controls: readonly LatticeControl[];
-  readonly reference: LatticeReference;
   readonly options?: Partial<LatticeOptions>;
+}
+
+export interface LatticeInput extends LatticeProblem {
+  readonly reference: LatticeReference;
 }
 
 /**
@@ -72,7 +93,6 @@ export interface LatticeInput {
  * surfaces on the centre plane carry nothing, is the leading part of the antisymmetric one.
  */
 export interface Lattice {
-  readonly reference: LatticeReference;
   readonly options: LatticeOptions;
   readonly surfaces: readonly LaidSurface[];
   /** Panels of mirrored surfaces. */
@@ -98,6 +118,9 @@ export interface LaidSurface {
   readonly firstCorner: number;
   /** Surfaces that continue each other share a family: there is no leg core between them. */
   readonly family: number;
+  /** Number of the surface among all, and those of the surfaces that it meets. */
+  readonly index: number;
+  readonly touches: ReadonlySet<number>;
 }
 
 export interface LaidStrip {

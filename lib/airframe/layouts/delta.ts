@@ -16,8 +16,8 @@ import {
 } from './kit';
 
 // Delta, 600 mm. Root 400, tip 120, straight trailing edge (quarter chord swept 35°): 15.6 dm2, aspect ratio 2.3, mean aerodynamic
-// chord 285 mm with its leading edge at x = 115 mm, so its quarter chord lies at x = 186 mm; a static margin near 8 % puts the CG about
-// 163 mm aft of the apex. About 265 g, 17 g/dm2; it flies slowly at a high angle, stall near 6 m/s.
+// chord 285 mm with its leading edge at x = 115 mm, so its quarter chord lies at x = 186 mm; a static margin near 9 % puts the CG about
+// 162 mm aft of the apex. About 260 g, 17 g/dm2; it flies slowly at a high angle, stall near 6 m/s. 2.6 N of thrust on 2.55 N of weight.
 
 const board = MATERIALS.lightBoard5.id;
 
@@ -36,17 +36,17 @@ const surfaces = (): Airframe['surfaces'] => [
     id: 'fin',
     name: 'Fin',
     role: 'fin',
-    mount: datum(245, 0, 2.5),
+    mount: datum(230, 0, 2.5),
     mirrored: false,
     cantDeg: 90,
-    panels: [flatPanel('p1', board, { length: 110, root: 150, tip: 80, sweepDeg: 25 })],
+    panels: [flatPanel('p1', board, { length: 132, root: 166, tip: 92, sweepDeg: 25 })],
   }),
 ];
 
 const items = (): Airframe['items'] => [
-  pack([90, [72, 34, 24]], datum(184, 0, -14), { fromMm: -50, toMm: 40 }, '3 cells 1100 mAh'),
+  pack([90, [72, 34, 24]], datum(180, 0, -14), { fromMm: -40, toMm: 40 }, '3 cells 1100 mAh'),
   controller([20, [45, 22, 8]], datum(60, 0, -7), '25 A'),
-  receiver(datum(112, 0, -8)),
+  receiver(datum(80, 0, 9)),
   servo('servo-stbd', 'Elevon servo, starboard', datum(270, 130, -4)),
   servo('servo-port', 'Elevon servo, port', datum(270, -130, -4)),
   hardware('mount', 'Motor mount', [8, [14, 30, 30]], datum(-4, 0, 0)),
@@ -70,10 +70,11 @@ export function delta(name: string): Airframe {
         facing: 'tractor',
         turns: 'cw',
         thrustDeg: [0, 0],
-        motor: { massG: 35, diameterMm: 28, lengthMm: 26, kvRpmPerV: 1500 },
+        motor: { massG: 35, diameterMm: 28, lengthMm: 26, kvRpmPerV: 900, maxW: 75 },
         propeller: { diameterMm: 178, pitchMm: 114, blades: 2, massG: 6 },
         controllerItemId: 'esc',
         packItemId: 'pack',
+        statedThrustN: 2.6,
       },
     ],
     items: items(),

@@ -17,7 +17,7 @@ import {
 
 // Swept tailless, 800 mm. Root 240, tip 140, quarter chord swept 22°: 15.2 dm2, mean aerodynamic chord 194 mm at 182 mm out, its
 // quarter chord at x = 60 + 182 tan 22° = 134 mm. With a static margin near 9 % the CG lies about 117 mm aft of the apex. A motor in
-// the nose brings it there with the pack over the root. About 255 g, 17 g/dm2; stall near 6 m/s.
+// the nose brings it there with the pack over the root. About 255 g, 17 g/dm2; stall near 6 m/s. 2.3 N of thrust on 2.5 N of weight.
 
 const board = MATERIALS.lightBoard5.id;
 
@@ -39,14 +39,14 @@ const surfaces = (): Airframe['surfaces'] => [
     mount: { to: 'wing', at: { station: 1, chordShare: 0.1 } },
     mirrored: true,
     cantDeg: 90,
-    panels: [flatPanel('p1', board, { length: 95, root: 115, tip: 75, sweepDeg: 20 })],
+    panels: [flatPanel('p1', board, { length: 115, root: 126, tip: 85, sweepDeg: 20 })],
   }),
 ];
 
 const items = (): Airframe['items'] => [
-  pack([85, [72, 34, 22]], datum(120, 0, 14), { fromMm: -40, toMm: 40 }, '3 cells 1000 mAh'),
-  controller([18, [45, 22, 8]], datum(45, 0, 7), '20 A'),
-  receiver(datum(190, 0, 8)),
+  pack([85, [72, 34, 22]], datum(114, 0, 14), { fromMm: -29, toMm: 35 }, '3 cells 1000 mAh'),
+  controller([18, [45, 22, 8]], datum(26, 0, 7), '20 A'),
+  receiver(datum(210, 0, 9)),
   servo('servo-stbd', 'Elevon servo, starboard', datum(165, 150, 4)),
   servo('servo-port', 'Elevon servo, port', datum(165, -150, 4)),
   hardware('mount', 'Motor mount', [8, [14, 30, 30]], datum(-4, 0, 0)),
@@ -70,10 +70,11 @@ export function tailless(name: string): Airframe {
         facing: 'tractor',
         turns: 'cw',
         thrustDeg: [0, 0],
-        motor: { massG: 28, diameterMm: 23, lengthMm: 26, kvRpmPerV: 1700 },
-        propeller: { diameterMm: 178, pitchMm: 102, blades: 2, massG: 6 },
+        motor: { massG: 28, diameterMm: 23, lengthMm: 26, kvRpmPerV: 1200, maxW: 65 },
+        propeller: { diameterMm: 152, pitchMm: 102, blades: 2, massG: 5 },
         controllerItemId: 'esc',
         packItemId: 'pack',
+        statedThrustN: 2.3,
       },
     ],
     items: items(),

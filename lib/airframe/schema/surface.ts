@@ -80,6 +80,12 @@ export const Control = z.strictObject({
   throwsDeg: z.strictObject({ up: between(0, 80), down: between(0, 80), lowShare: between(0.05, 1) }),
   /** Share by which the down-going side moves less: 0 none, 1 no down at all. */
   differential: share,
+  /**
+   * Share of its throw that each stick takes, and by its sign the way. Positive: up stick lifts the trailing edge of a control on a wing
+   * or behind it and drops it ahead of the wing (on a foreplane, or hinged ahead of the quarter point of the wing's mean chord); right
+   * stick lifts the starboard side; right rudder moves trailing edges to starboard on a wing or behind it, to port ahead; flaps go down.
+   * A wing flap that goes down with up stick has a negative share of pitch. The CG has no say.
+   */
   mix: z.strictObject({ pitch: between(-1, 1), roll: between(-1, 1), yaw: between(-1, 1), flap: between(-1, 1) }),
   linkage: Linkage.optional(),
 });

@@ -10,5 +10,6 @@ export const shapeEntries = {
   aerodynamicCentreXMm: entry('aerodynamicCentreXMm', 'mm', 'mm', 1),
   tailVolumeH: entry('tailVolumeH', '', 'none', 2),
   tailVolumeV: entry('tailVolumeV', '', 'none', 3),
+  spanEfficiency: entry('spanEfficiency', '', 'none', 2),
   reynoldsMac: entry('reynoldsMac', '', 'none', 0),
 } as const;

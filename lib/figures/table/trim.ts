@@ -1,1 +1,10 @@
-export const trimEntries = {} as const;
+import { entriesOf } from './entry';
+
+const entry = entriesOf('trim');
+
+export const trimEntries = {
+  trimElevatorDeg: entry('trimElevatorDeg', '°', 'deg', 1),
+  trimShareOfThrowPct: entry('trimShareOfThrowPct', '%', 'percent', 0),
+  stallElevatorSharePct: entry('stallElevatorSharePct', '%', 'percent', 0),
+  throttleTrimDeg: entry('throttleTrimDeg', '°', 'deg', 1),
+} as const;

@@ -16,7 +16,9 @@ interface Spot {
 function spotOn(ring: Ring, p: Vec2): Spot | null {
   let best: Spot = { edge: 0, along: 0 };
   let least = Number.POSITIVE_INFINITY;
-  for (const [edge, [a, b]] of edges(ring).entries()) {
+  for (let edge = 0; edge < ring.length; edge++) {
+    const [a, b] = [ring[edge], ring[(edge + 1) % ring.length]];
+    if (!a || !b) break;
     const away = distanceToEdge(p, a, b);
     if (away < least - 1e-12) {
       least = away;

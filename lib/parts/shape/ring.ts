@@ -23,13 +23,19 @@ export function distanceToEdge(p: Vec2, a: Vec2, b: Vec2): number {
   const dy = b[1] - a[1];
   const square = dx * dx + dy * dy;
   const t = square === 0 ? 0 : Math.min(1, Math.max(0, ((p[0] - a[0]) * dx + (p[1] - a[1]) * dy) / square));
-  return Math.hypot(p[0] - a[0] - t * dx, p[1] - a[1] - t * dy);
+  const x = p[0] - a[0] - t * dx;
+  const y = p[1] - a[1] - t * dy;
+  return Math.sqrt(x * x + y * y);
 }
 
 /** Distance from a point to the ring's nearest edge. */
 export function distanceToRing(p: Vec2, ring: Ring): number {
   let least = Number.POSITIVE_INFINITY;
-  for (const [a, b] of edges(ring)) least = Math.min(least, distanceToEdge(p, a, b));
+  let a = ring.at(-1);
+  for (const b of ring) {
+    if (a) least = Math.min(least, distanceToEdge(p, a, b));
+    a = b;
+  }
   return least;
 }
 
@@ -94,10 +100,12 @@ export function beginAt(ring: Ring, corner: Vec2 | undefined): Vec2[] {
 /** Two edges of the ring that cross or touch each other, by index, or null for a simple ring. */
 export function selfCrossing(ring: Ring): readonly [number, number] | null {
   const sides = edges(ring);
-  for (const [i, [a, b]] of sides.entries()) {
-    for (const [offset, [c, d]] of sides.slice(i + 2).entries()) {
-      const j = i + 2 + offset;
-      if (i === 0 && j === sides.length - 1) continue;
+  for (let i = 0; i < sides.length; i++) {
+    const one = sides[i];
+    for (let j = i + 2; j < sides.length; j++) {
+      const other = sides[j];
+      if (!one || !other || (i === 0 && j === sides.length - 1) || apart(one, other)) continue;
+      const [[a, b], [c, d]] = [one, other];
       const touching =
         Math.min(distanceToEdge(a, c, d), distanceToEdge(b, c, d), distanceToEdge(c, a, b), distanceToEdge(d, a, b)) <
         NOTHING_MM;
@@ -106,6 +114,15 @@ export function selfCrossing(ring: Ring): readonly [number, number] | null {
   }
   return null;
 }
+
+/** True when two edges are too far apart, along x or along y, to meet: most are, and this is soon told. */
+const apart = ([a, b]: Edge, [c, d]: Edge): boolean =>
+  Math.min(a[0], b[0]) - Math.max(c[0], d[0]) > NOTHING_MM ||
+  Math.min(c[0], d[0]) - Math.max(a[0], b[0]) > NOTHING_MM ||
+  Math.min(a[1], b[1]) - Math.max(c[1], d[1]) > NOTHING_MM ||
+  Math.min(c[1], d[1]) - Math.max(a[1], b[1]) > NOTHING_MM;
+
+type Edge = readonly [Vec2, Vec2];
 
 /** Whether a point lies inside the ring or on its edge, to what a blade can follow. */
 export const onSheet = (p: Vec2, ring: Ring): boolean => contains(ring, p) || distanceToRing(p, ring) <= SAME_POINT_MM;

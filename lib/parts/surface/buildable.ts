@@ -6,14 +6,14 @@ import { texts } from '@/lib/text/en/parts';
 import { fill } from '@/lib/text/fill';
 import { trimmedDigits } from '@/lib/units/number';
 
-/** What of a surface can be cut from flat sheet, and what stands in the way of the rest. */
+/** What of a surface can be cut from flat sheet or folded from it, and what stands in the way of the rest. */
 export function buildablePanels(
   resolved: ResolvedSurface,
   materials: ReadonlyMap<string, Material>,
-): { panels: ResolvedPanel[]; problems: Problem[] } {
+): { flat: ResolvedPanel[]; folded: ResolvedPanel[]; problems: Problem[] } {
   const base = `surfaces.${resolved.index}`;
   const problems: Problem[] = [];
-  const panels = resolved.panels.filter(({ panel, index }) => {
+  const buildable = resolved.panels.filter(({ panel, index }) => {
     const path = `${base}.panels.${index}`;
     const before = resolved.panels[index - 1]?.panel;
     if (before && Math.abs(before.tipChordMm - panel.rootChordMm) > SAME_POINT_MM) {
@@ -31,7 +31,7 @@ export function buildablePanels(
       problems.push({ code: 'unknown-reference', path: `${path}.materialId`, message });
       return false;
     }
-    if (panel.section.kind !== 'flat') {
+    if (panel.section.kind !== 'flat' && panel.section.kind !== 'folded') {
       problems.push(
         notBuiltYet(`${path}.section.kind`, fill(texts.notBuilt.sectionKind, { kind: panel.section.kind })),
       );
@@ -44,5 +44,6 @@ export function buildablePanels(
     return true;
   });
   if (resolved.surface.ribs.length > 0) problems.push(notBuiltYet(`${base}.ribs`, texts.notBuilt.ribs));
-  return { panels, problems };
+  const folded = buildable.filter(({ panel }) => panel.section.kind === 'folded');
+  return { flat: buildable.filter((panel) => !folded.includes(panel)), folded, problems };
 }

@@ -15,6 +15,7 @@ import { buildablePanels } from './buildable';
 import { hingeLine } from './control';
 import { controlledSheet, type MovingPiece } from './controlledSheet';
 import { cutoutRings } from './cutout';
+import { foldedParts } from './folded/foldedParts';
 import { isDoubleBevel } from './hinge';
 import { cutToSeam, type Seam, seamOf, seamOperations, seamProblems } from './joint';
 import { meetsItsMirror, type Run, runsOf } from './run';
@@ -198,19 +199,20 @@ function runParts(run: Run, { controls, turning, stock, booms }: Fittings): Deve
   };
 }
 
-/** Parts, tubes and problems of one surface. What is not flat sheet is named as not built yet; the rest still comes. */
+/** Parts, tubes and problems of one surface. What is neither flat nor folded is named as not built yet; the rest still comes. */
 export function surfaceParts(
   resolved: ResolvedSurface,
   controls: readonly ResolvedControl[],
   stock: Stock,
   booms: readonly BoomHere[],
 ): Developed {
-  const { panels, problems } = buildablePanels(resolved, stock.materials);
+  const { flat, folded, problems } = buildablePanels(resolved, stock.materials);
   const own = controls.filter(({ surfaceId }) => surfaceId === resolved.surface.id);
   const { turning, problems: turningProblems } = allMoving(resolved, own);
-  const runs = runsOf(resolved, panels, stock.materials).map((run) =>
+  const runs: Developed[] = runsOf(resolved, flat, stock.materials).map((run) =>
     runParts(run, { controls: own, turning: turning[0], stock, booms }),
   );
+  if (folded.length > 0) runs.push(foldedParts(resolved, folded, { controls: own, ...stock, booms }));
   return {
     parts: runs.flatMap(({ parts }) => parts),
     stockPieces: runs.flatMap(({ stockPieces }) => stockPieces),

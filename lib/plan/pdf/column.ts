@@ -9,7 +9,7 @@ export interface Column {
 }
 
 /** Heights are of capitals; the line is 1.9 of them. */
-const LEADING = 1.9;
+export const LEADING = 1.9;
 
 /** A heading with the notched rule under it. */
 export function heading(

@@ -1,33 +1,31 @@
 import { plan } from '@/lib/text/en/plan';
 import { fill } from '@/lib/text/fill';
-import type { BuildNotes } from '../buildNotes';
+import { cgFigures, estimateFigures } from '../cardFigures';
+import { throwRows } from '../throwRows';
 import type { PageFormat } from '../tiling/grid';
-import type { TiledSheet } from '../tiling/tileSheets';
 import { bar } from './bars';
 import { type Column, heading, paragraph } from './column';
-import { estimates } from './estimates';
+import {
+  CHECK_MM,
+  coverRoom,
+  LIST_GUTTER_MM,
+  LIST_ROW_MM,
+  LIST_STYLE,
+  listWidthsMm,
+  rowsThatFit,
+  TITLE_MM,
+} from './coverRoom';
+import { FIGURE_ROW_MM, figureRow } from './figureRow';
 import type { Typefaces } from './fonts';
 import type { FrontContext, FrontInput } from './front';
 import { type PlanNames, stateWords } from './furniture';
 import { letter, lineStyle, path, shorten, wrap } from './ink';
 import { legend } from './legend';
-import { type Frame, map } from './map';
+import type { Frame } from './map';
+import { fittedLine, HEADING_MM } from './rows';
+import { throwTable } from './throwTable';
 
 const words = plan.cover;
-
-/** Sheets on the first page's map; the rest go on map pages. */
-const MAP_FIRST = 6;
-const MAP_MORE = 20;
-
-/** How many pages of maps follow the first page. */
-export const mapPages = (sheetCount: number): number => Math.ceil(Math.max(0, sheetCount - MAP_FIRST) / MAP_MORE);
-
-const CHECK_MM = 118;
-const TITLE_MM = 14;
-const ESTIMATES_MM = 20;
-const ROW_MM = 3.5;
-/** Lines of a list on the first page; the last of a longer one counts the rest. */
-const MOST_ROWS = 9;
 
 function title(faces: Typefaces, { design, revision }: PlanNames, frame: Frame): string {
   const top = frame.y + frame.h;
@@ -93,72 +91,65 @@ function list(
   faces: Typefaces,
   title: string,
   rows: readonly string[],
+  most: number,
   column: Column,
   top: number,
-): { ink: string; top: number } {
-  const style = { face: 'text', capMm: 1.8 } as const;
+): string {
   const head = heading(faces, title, column, top);
-  const shown = rows.length > MOST_ROWS ? rows.slice(0, MOST_ROWS - 1) : rows;
-  const rest = rows.length - shown.length;
-  const lines = rest > 0 ? [...shown, fill(plan.build.more, { count: rest })] : shown;
-  const ink = lines.map((text, i) =>
-    letter(faces, shorten(faces, text, column.widthMm, style), [column.x, head.top - style.capMm - i * ROW_MM], style),
+  const { lines, rest } = rowsThatFit(rows, column.widthMm, most);
+  const more = rest > 0 ? [fill(plan.build.moreThere, { count: rest, page: plan.page.notes })] : [];
+  const ink = [...lines, ...more].map((text, i) =>
+    fittedLine(faces, text, column, head.top - LIST_STYLE.capMm - i * LIST_ROW_MM, LIST_STYLE),
   );
-  return { ink: [head.ink, ...ink].join('\n'), top: head.top - lines.length * ROW_MM - 2 };
+  return [head.ink, ...ink].join('\n');
 }
 
-/** What to gather on the left, how to set it up on the right. */
-function lists(faces: Typefaces, build: BuildNotes | null, frame: Column, top: number): { ink: string; top: number } {
-  if (!build) return { ink: '', top };
-  const widthMm = (frame.widthMm - 8) / 2;
-  const need = list(faces, plan.build.need, build.need, { x: frame.x, widthMm }, top);
-  const setUp = list(faces, plan.build.setUp, build.setUp, { x: frame.x + widthMm + 8, widthMm }, top);
-  return { ink: [need.ink, setUp.ink].join('\n'), top: Math.min(need.top, setUp.top) };
+/** The card itself, from the title down: estimates, where the CG is marked, throws, what to gather, and what else to set. */
+function builderCard(faces: Typefaces, format: PageFormat, input: FrontInput, frame: Frame): string {
+  const { figures, build } = input;
+  const room = coverRoom(format, input);
+  const whole: Column = { x: frame.x, widthMm: frame.w };
+  const row = (top: number): Frame => ({ x: frame.x, y: top - FIGURE_ROW_MM, w: frame.w, h: FIGURE_ROW_MM });
+  const cgTop = frame.y + frame.h - FIGURE_ROW_MM;
+  const cgHead = heading(faces, words.cgTitle, whole, cgTop);
+  const throwsTop = cgTop - HEADING_MM - FIGURE_ROW_MM;
+  const throws =
+    figures?.setUp && room.throwRows > 0
+      ? throwTable(faces, throwRows(figures.setUp), room.throwRows, whole, throwsTop)
+      : { ink: '', top: throwsTop };
+  const widths = listWidthsMm(format);
+  const left: Column = { x: frame.x, widthMm: widths.need };
+  const right: Column = { x: left.x + left.widthMm + LIST_GUTTER_MM, widthMm: widths.setUp };
+  return [
+    figureRow(faces, estimateFigures(figures), row(frame.y + frame.h)),
+    cgHead.ink,
+    figureRow(faces, cgFigures(figures), row(cgHead.top)),
+    throws.ink,
+    ...(build
+      ? [
+          list(faces, plan.build.need, build.need, room.listLines, left, throws.top),
+          list(
+            faces,
+            figures?.setUp ? plan.build.alsoSet : plan.build.setUp,
+            build.setUp,
+            room.listLines,
+            right,
+            throws.top,
+          ),
+        ]
+      : []),
+  ].join('\n');
 }
 
-/** The first page: name and state, estimates, what to gather and set, map, check bars, legend, how to print, cautions. */
-export function cover(faces: Typefaces, format: PageFormat, input: FrontInput, context: FrontContext): string {
+/** The first page: the builder's card, then check bars, legend, how to print, and cautions. */
+export function cover(faces: Typefaces, format: PageFormat, input: FrontInput, { names }: FrontContext): string {
   const [x0, y0, x1, y1] = format.clipMm;
   const frame: Frame = { x: x0, y: y0, w: x1 - x0, h: y1 - y0 };
-  const whole: Column = { x: frame.x, widthMm: frame.w };
-  const figuresTop = y1 - TITLE_MM;
-  const build = lists(faces, input.build, whole, figuresTop - ESTIMATES_MM);
-  const mapHead = heading(faces, words.map, whole, build.top);
-  const mapBottom = y0 + CHECK_MM + 4;
-  const mapFrame: Frame = { x: frame.x, y: mapBottom, w: frame.w, h: Math.max(20, mapHead.top - mapBottom) };
   const column: Column = { x: frame.x + CHECK_MM + 6, widthMm: Math.min(90, frame.w - CHECK_MM - 6) };
-  const more = mapPages(input.sheets.length) > 0;
   return [
-    title(faces, context.names, frame),
-    estimates(faces, input.figures, { x: frame.x, y: figuresTop - ESTIMATES_MM, w: frame.w, h: ESTIMATES_MM }),
-    build.ink,
-    mapHead.ink,
-    more
-      ? letter(faces, fill(words.mapMore, { page: 2 }), [x1, build.top - 2.5], {
-          face: 'mono',
-          capMm: 1.8,
-          align: 'right',
-        })
-      : '',
-    map(faces, input.sheets.slice(0, MAP_FIRST), mapFrame, context.pageOf),
+    title(faces, names, frame),
+    builderCard(faces, format, input, { ...frame, h: frame.h - TITLE_MM }),
     checks(faces, input, frame.x, frame.y),
     advice(faces, column, y0 + CHECK_MM),
-  ]
-    .filter(Boolean)
-    .join('\n');
-}
-
-/** A further page of maps; `index` counts from 0 for the first after the first page. */
-export function mapPage(
-  faces: Typefaces,
-  format: PageFormat,
-  sheets: readonly TiledSheet[],
-  pageOf: (index: number) => number,
-  index: number,
-): string {
-  const [x0, y0, x1, y1] = format.clipMm;
-  const first = MAP_FIRST + index * MAP_MORE;
-  const head = heading(faces, words.map, { x: x0, widthMm: x1 - x0 }, y1 - 2);
-  const frame: Frame = { x: x0, y: y0 + 2, w: x1 - x0, h: head.top - y0 - 2 };
-  return [head.ink, map(faces, sheets.slice(first, first + MAP_MORE), frame, pageOf)].join('\n');
+  ].join('\n');
 }

@@ -3,10 +3,11 @@ import { plan } from '@/lib/text/en/plan';
 import type { BuildNotes } from '../buildNotes';
 import type { PageFormat } from '../tiling/grid';
 import type { TiledSheet } from '../tiling/tileSheets';
-import { cover, mapPage, mapPages } from './cover';
+import { cover } from './cover';
 import type { Typefaces } from './fonts';
 import type { PlanNames } from './furniture';
 import { notesPages } from './notes';
+import { setUpPages } from './setUpPage';
 
 export interface FrontInput {
   readonly sheets: readonly TiledSheet[];
@@ -30,20 +31,13 @@ export interface FrontPage {
   readonly ink: (faces: Typefaces, context: FrontContext) => string;
 }
 
-/** The pages before the first tile: the first page, further maps where one has no room for all sheets, then lines, joining, checks and key. */
+/** The pages before the first tile: the builder's card; scale, joining, checks, key and map; the set-up sheet, where the figures hold one. */
 export function frontPages(format: PageFormat, input: FrontInput): FrontPage[] {
-  const maps = Array.from(
-    { length: mapPages(input.sheets.length) },
-    (_, i): FrontPage => ({
-      kind: 'cover',
-      name: plan.page.map,
-      ink: (faces, context) => mapPage(faces, format, input.sheets, context.pageOf, i),
-    }),
-  );
+  const { setUp } = input.figures ?? {};
   const first: FrontPage = {
     kind: 'cover',
     name: plan.page.cover,
     ink: (faces, context) => cover(faces, format, input, context),
   };
-  return [first, ...maps, ...notesPages(format, input)];
+  return [first, ...notesPages(format, input), ...(setUp ? setUpPages(format, setUp) : [])];
 }

@@ -5,78 +5,24 @@ import { joinChecks } from '../tiling/joinChecks';
 import type { TiledSheet } from '../tiling/tileSheets';
 import { card, ID1_MM } from './card';
 import { type Column, heading, paragraph } from './column';
+import { coverRoom, listWidthsMm, rowsThatFit } from './coverRoom';
 import type { Typefaces } from './fonts';
 import type { FrontInput, FrontPage } from './front';
-import { letter } from './ink';
+import { type Frame, map } from './map';
+import { mapPages } from './mapPages';
+import { endMm, flow, HEADING_MM, rowInk, type Section } from './rows';
 
 // The pages for the bench: a card to check the scale, how to join, lengths to measure, and the key of marks on small parts.
 
 const words = plan.cover;
 
-const HEAD_MM = 6.5;
-const ROW_MM = 3.7;
-const ROW_STYLE = { face: 'text', capMm: 1.8 } as const;
-/** Mean width of a letter over the height of a capital, rounded up. */
-const LETTER_SHARE = 0.84;
 /** Height of card and joining on top of the first of these pages. */
 const TOP_MM = 78;
 
-interface Section {
-  readonly title: string;
-  readonly rows: readonly string[];
-}
-
-interface Item {
-  readonly kind: 'heading' | 'row';
-  readonly text: string;
-  /** Down from the top of the page's room, mm. */
-  readonly downMm: number;
-}
-
-/** A text in lines of at most so many letters, broken between words; a longer word is broken by letters. */
-export function wrapByCount(text: string, most: number): string[] {
-  const lines: string[] = [];
-  let current = '';
-  for (const word of text.split(/\s+/).filter(Boolean)) {
-    const joined = current ? `${current} ${word}` : word;
-    if (joined.length <= most) {
-      current = joined;
-      continue;
-    }
-    if (current) lines.push(current);
-    current = word;
-    while (current.length > most) {
-      lines.push(current.slice(0, most));
-      current = current.slice(most);
-    }
-  }
-  if (current) lines.push(current);
-  return lines;
-}
-
-/** Sections in rows from page to page; a heading never stands alone at a page's foot. */
-function flow(sections: readonly Section[], widthMm: number, firstMm: number, moreMm: number): Item[][] {
-  const most = Math.max(20, Math.floor(widthMm / (ROW_STYLE.capMm * LETTER_SHARE)));
-  let page: Item[] = [];
-  const pages = [page];
-  let downMm = 0;
-  const make = (kind: Item['kind'], text: string, highMm: number, followedMm: number): void => {
-    if (downMm + highMm + followedMm > (pages.length === 1 ? firstMm : moreMm)) {
-      page = [];
-      pages.push(page);
-      downMm = 0;
-    }
-    page.push({ kind, text, downMm });
-    downMm += highMm;
-  };
-  for (const { title, rows } of sections) {
-    if (rows.length === 0) continue;
-    make('heading', title, HEAD_MM, ROW_MM);
-    for (const row of rows) for (const line of wrapByCount(row, most)) make('row', line, ROW_MM, 0);
-    downMm += 3;
-  }
-  return pages;
-}
+/** A map lower than this is too small to read; more sheets than these are. */
+const LEAST_MAP_MM = 60;
+const MOST_SHEETS = 6;
+const MAP_GAP_MM = 4;
 
 const keyRows = (sheets: readonly TiledSheet[]): string[] =>
   sheets.flatMap(({ drawing: { name: sheet, key } }) =>
@@ -103,29 +49,65 @@ function topOf(faces: Typefaces, input: FrontInput, frame: Column, top: number):
   return ink.join('\n');
 }
 
-/** Scale, joining, check lengths, key, and what is not on the sheets; one page, more when the key is long. */
+/** Lists that the first page has no room for, in full. */
+function cutLists(format: PageFormat, input: FrontInput): Section[] {
+  const { build } = input;
+  if (!build) return [];
+  const { listLines } = coverRoom(format, input);
+  const widths = listWidthsMm(format);
+  const cut = (rows: readonly string[], widthMm: number): boolean => rowsThatFit(rows, widthMm, listLines).rest > 0;
+  return [
+    ...(cut(build.need, widths.need) ? [{ title: plan.build.need, rows: build.need }] : []),
+    ...(cut(build.setUp, widths.setUp) ? [{ title: plan.build.setUp, rows: build.setUp }] : []),
+  ];
+}
+
+/**
+ * Scale, joining, check lengths, key, what is not on the sheets, and the map of sheets and pages; one page, more when there is much of
+ * it. A map that has no room under the rest gets pages of its own.
+ */
 export function notesPages(format: PageFormat, input: FrontInput): FrontPage[] {
   const [x0, y0, x1, y1] = format.clipMm;
   const frame: Column = { x: x0, widthMm: x1 - x0 };
   const sections: Section[] = [
     { title: words.checks, rows: input.sheets.flatMap(joinChecks) },
     { title: words.key, rows: keyRows(input.sheets) },
+    ...cutLists(format, input),
     { title: words.notDrawn, rows: input.notDrawn },
   ];
   const top = y1 - 2;
-  const pages = flow(sections, frame.widthMm, Math.max(0, top - TOP_MM - y0), top - y0);
-  return pages.map((items, i): FrontPage => {
-    const from = i === 0 ? top - TOP_MM : top;
-    const rows = (faces: Typefaces): string[] =>
-      items.map(({ kind, text, downMm }) =>
-        kind === 'heading'
-          ? heading(faces, text, frame, from - downMm).ink
-          : letter(faces, text, [frame.x, from - downMm - ROW_STYLE.capMm], ROW_STYLE),
-      );
+  const fromOf = (page: number): number => (page === 0 ? top - TOP_MM : top);
+  const pages = flow(sections, { widthMm: frame.widthMm, roomMm: (page) => Math.max(0, fromOf(page) - y0) });
+  const last = pages.length - 1;
+  const mapTop = fromOf(last) - endMm(pages[last] ?? []) - MAP_GAP_MM;
+  const mapFits = input.sheets.length <= MOST_SHEETS && mapTop - HEADING_MM - y0 >= LEAST_MAP_MM;
+  const notes = pages.map((rows, page): FrontPage => {
+    const ofRows = (faces: Typefaces): string[] => rows.map((row) => rowInk(faces, row, frame, fromOf(page)));
     return {
       kind: 'legend',
       name: plan.page.notes,
-      ink: (faces) => [i === 0 ? topOf(faces, input, frame, top) : '', ...rows(faces)].filter(Boolean).join('\n'),
+      ink: (faces, { pageOf }) =>
+        [
+          page === 0 ? topOf(faces, input, frame, top) : '',
+          ...ofRows(faces),
+          mapFits && page === last ? mapUnder(faces, input, frame, mapTop, y0, pageOf) : '',
+        ]
+          .filter(Boolean)
+          .join('\n'),
     };
   });
+  return mapFits ? notes : [...notes, ...mapPages(format, input.sheets)];
+}
+
+function mapUnder(
+  faces: Typefaces,
+  { sheets }: FrontInput,
+  frame: Column,
+  top: number,
+  bottom: number,
+  pageOf: (index: number) => number,
+): string {
+  const head = heading(faces, words.map, frame, top);
+  const room: Frame = { x: frame.x, y: bottom, w: frame.widthMm, h: head.top - bottom };
+  return [head.ink, map(faces, sheets, room, pageOf)].join('\n');
 }

@@ -53,6 +53,10 @@ export const figures = {
   estimate: 'Figures are estimates. Weigh and measure what you build.',
   within: '{fore} inside the fore limit, {aft} inside the aft',
   more: 'All figures',
+  counts: 'Counted beside the lifting surfaces',
+  countBodies: 'bodies',
+  countPropellers: 'propellers and fans',
+  countNote: 'For comparing here. A release counts everything.',
   field: '{message} ({path})',
 } as const;
 

@@ -254,7 +254,8 @@ export const print = {
   paper: 'Paper in the printer',
   what: 'What comes out',
   whatList: [
-    'a first page with the map of tiles, legend, cautions and bars to check the scale',
+    "a first page with the builder's card, legend, cautions and bars to check the scale",
+    'a page that says how it is joined, with the map of tiles, and the set-up sheet of the controls',
     'every sheet with its parts, cut into tiles named by row and column',
     'a 50 mm bar in both directions on every page',
   ],

@@ -51,8 +51,8 @@ const marks = {
 };
 
 const notBuilt = {
-  sectionKind: 'only flat sheet can be turned into parts so far, not a "{kind}" section',
-  washout: 'a flat sheet cannot hold a twist; set it to 0',
+  sectionKind: 'only flat and folded sheet can be turned into parts so far, not a "{kind}" section',
+  washout: 'sheet cannot be cut for a twist so far; set it to 0',
   tipOutline: 'a tip drawn point by point',
   jointKind: 'a "{joint}" at a joint; the panels are bevelled and glued without it',
   ribs: 'ribs on a flat sheet',

@@ -6,7 +6,7 @@ export const texts = {
     name: 'Tarrel 620',
     one: {
       reason:
-        'Longer booms and a larger tailplane. The first one hunted in pitch at every speed and would not be trimmed.',
+        'Longer booms and a larger tailplane, with the pack further forward to carry them. The first one hunted in pitch at every speed and would not be trimmed.',
       effect: 'More tail volume moves the neutral point aft, so the static margin grows and the hunting should stop.',
       question: 'Is the tailplane still inside one sheet with its hinge strip?',
       answer: 'Yes, both halves come out of one sheet beside each other, with the hinge side along the grain.',
@@ -30,7 +30,7 @@ export const texts = {
   ombry: {
     name: 'Ombry 1000',
     reason: 'First release of the trainer.',
-    effect: 'Slow enough to be thrown by a beginner, and stable about all three axes.',
+    effect: 'Slow enough to be learned on, off its wheels, and stable about all three axes.',
     seen: 'Read through, not worked through.',
   },
   quenletSmall: { name: 'Quenlet 700' },

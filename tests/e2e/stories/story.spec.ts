@@ -50,7 +50,7 @@ async function shape(page: Page): Promise<{ readonly spanMm: number }> {
   await expectWorkedOut(page);
   const start = await wingTyped(page);
   await expectWingFigures(page, start);
-  const before = { neutralPoint: await figureShown(page, 'neutralPointXMm'), range: await rangeShown(page) };
+  const before = { neutralPoint: await figureShown(page, 'neutralPointPct'), range: await rangeShown(page) };
 
   await test.step('area follows the span handle while the hand still holds it', async () => {
     await drag(page, handle(page, SPAN), [0, -48], async () => {
@@ -63,7 +63,7 @@ async function shape(page: Page): Promise<{ readonly spanMm: number }> {
   await expect(handle(page, SPAN)).toHaveAttribute('aria-valuenow', String(longer.spanMm));
   await test.step('neutral point and CG range move with the span; the mean chord does not', async () => {
     await expectWingFigures(page, longer);
-    await expect.poll(() => figureShown(page, 'neutralPointXMm')).not.toBe(before.neutralPoint);
+    await expect.poll(() => figureShown(page, 'neutralPointPct')).not.toBe(before.neutralPoint);
     await expect.poll(() => rangeShown(page)).not.toBe(before.range);
   });
 

@@ -1,3 +1,5 @@
+import { FOR_DRAWING } from './lattice';
+
 export const shapeFigures = {
   spanMm: {
     name: 'Span',
@@ -30,7 +32,7 @@ export const shapeFigures = {
   },
   aerodynamicCentreXMm: {
     name: 'Aerodynamic centre of the wing',
-    explanation: 'Where the wing alone carries added lift. The tail moves it back to the neutral point.',
+    explanation: `Where the wing alone carries added lift. The tail moves it back to the neutral point. ${FOR_DRAWING}`,
     method: 'Quarter point of the mean aerodynamic chord.',
     source: 'Thin-aerofoil theory; Raymer, Aircraft Design, ch. 7.',
     limits:
@@ -50,6 +52,17 @@ export const shapeFigures = {
     method: 'Fin area times arm (quarter MAC to quarter MAC), over wing area times span; both fins of a pair count.',
     source: 'Raymer, Aircraft Design, eq. 6.27; V-tail: Purser & Campbell, NACA TR 823 (1945).',
     limits: 'Says nothing of sweep and dihedral, which also weathercock.',
+  },
+  spanEfficiency: {
+    name: 'Span efficiency',
+    explanation:
+      'How close lift comes to the least drag that it can cost on this span: 1 is an elliptic load. Fins at the tips bring it over 1.',
+    method:
+      "Lift coefficient squared over pi, aspect ratio and the induced drag of the wake far behind, for the load that angle of attack gives the whole aircraft. Beside it the wing alone by Glauert's lifting line.",
+    source:
+      'Munk, NACA TR 121; Katz & Plotkin, Low-Speed Aerodynamics, ch. 12. Lifting line: Glauert, Elements of Aerofoil and Airscrew Theory.',
+    limits:
+      'The lifting line knows neither sweep nor tail, so the two differ for swept wings and with fins at the tips.',
   },
   reynoldsMac: {
     name: 'Reynolds number at the MAC',

@@ -20,7 +20,7 @@ export async function reviewPage(workshopId: string, designId: string, number: n
   const base = await revisionPage(workshopId, designId, number);
   const { who, shop, revision: frozen } = base;
   const figures = figureRows(frozen.figures);
-  const development = await revisionParts(who, workshopId, designId, number);
+  const { development } = await revisionParts(who, workshopId, designId, number);
   const parts = partRows(development.parts, frozen.airframe);
   return {
     ...base,

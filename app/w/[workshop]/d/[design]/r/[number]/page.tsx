@@ -5,6 +5,8 @@ import { StateBadge } from '@/components/ui/Badge';
 import { LinkButton } from '@/components/ui/Button';
 import { Page } from '@/components/ui/Page';
 import { apiPaths, paths } from '@/components/ui/paths';
+import { page as figures } from '@/lib/text/en/figurePages';
+import { page as parts } from '@/lib/text/en/partsPage';
 import { review as words } from '@/lib/text/en/review';
 import { fill } from '@/lib/text/fill';
 import { designTrail } from '../../trail';
@@ -31,6 +33,9 @@ export default async function ReviewPage({ params }: { readonly params: Params }
     <>
       <StateBadge state={revision.state} />
       <LinkButton href={paths.revisions(workshop, design)}>{words.revisions}</LinkButton>
+      <LinkButton href={paths.figures(workshop, design, number)}>{figures.link}</LinkButton>
+      <LinkButton href={paths.setUp(workshop, design, number)}>{figures.setUp}</LinkButton>
+      <LinkButton href={paths.parts(workshop, design, number)}>{parts.link}</LinkButton>
       <LinkButton href={paths.print(workshop, design, number)}>{words.print}</LinkButton>
     </>
   );

@@ -1,0 +1,67 @@
+// The set-up sheet, on screen and on paper: rows to be ticked.
+
+const sticks = { pitch: 'Elevator stick', roll: 'Aileron stick', yaw: 'Rudder stick', flap: 'Flap switch' } as const;
+const full = {
+  pitch: 'elevator stick back',
+  roll: 'aileron stick right',
+  yaw: 'rudder stick right',
+  flap: 'flaps out',
+} as const;
+const ways = {
+  up: 'up {deg}°',
+  down: 'down {deg}°',
+  stbd: 'to starboard {deg}°',
+  port: 'to port {deg}°',
+  none: 'stays at neutral',
+} as const;
+const sides = { stbd: 'starboard {control}', port: 'port {control}', centre: '{control}' } as const;
+
+export const setUp = {
+  page: 'set-up sheet',
+  title: 'Set-up sheet: starting values, trim in flight',
+  caution: 'Propeller off for every set-up. Pack plugged in last, aircraft held, hands clear of the disc.',
+  how: 'Millimetres are read with a rule at the trailing edge, straight from neutral, at the widest chord of the control. Up, down, port and starboard as seen from behind.',
+  radio: 'Transmitter',
+  lowRate: 'Low rate: {pct} % of the throw, on a switch. First flight on low rate.',
+  expo: 'Expo {pct} %, softer at the centre. Try it: transmitters differ in its sign.',
+  noExpo: 'No expo.',
+  control: '{control}: {surface}',
+  both: '{control}, both sides: {surface}',
+  neutralLevel: 'Neutral: in line with the surface ahead of it.',
+  neutral: 'Neutral: {way} = {mm} mm.',
+  high: '{stick}, high rate: {ends}.',
+  low: '{stick}, low rate: {ends}.',
+  fixed: '{stick}: {ends}.',
+  end: '{way} = {mm} mm',
+  differential: 'Differential {pct} %: the side that goes down moves that much less.',
+  widest: 'Measured {mm} mm behind the hinge.',
+  linkage: 'Linkage: arm hole {arm} mm from the shaft of {servo}, horn hole {horn} mm from the hinge.',
+  suggested: 'No linkage in the document. Start with arm hole {arm} mm, horn hole {horn} mm.',
+  rod: 'Rod: {stuff}, {diameter} mm, {length} mm between the holes.',
+  stuff: { wire: 'steel wire', carbon: 'carbon' },
+  travel: 'Full throw turns the servo {up}° one way and {down}° the other: {pct} % of its travel.',
+  deadCentre: 'The linkage meets a dead centre before full throw: change it before you build it.',
+  noLinkage: 'Its linkage cannot be worked out: see the problems of the document.',
+  directions: 'Directions and mixes, full high rate, seen from behind',
+  move: '{sticks}: {sides}.',
+  moveOver: '{sticks}: {sides}. Over the {limit}° that a shared linkage has: make a throw smaller.',
+  together: '{one} with {other}',
+  sideMove: '{side} {way}',
+  upStickDropsNose:
+    'up stick would bring the nose down and make the aircraft faster: the {control} turns the wrong way for where it stands',
+  upStickDropsNoseFix: 'reverse the sign of its share of pitch, or move it to the other side of the neutral point',
+  angles: 'Angles against the datum line',
+  incidenceUp: '{name}: leading edge {deg}° up.',
+  incidenceDown: '{name}: leading edge {deg}° down.',
+  incidenceNone: '{name}: level.',
+  thrust: '{name}: thrust line {down}, {right}.',
+  thrustNone: '{name}: thrust line straight.',
+  thrustDown: '{deg}° down',
+  thrustUp: '{deg}° up',
+  thrustRight: '{deg}° right',
+  thrustLeft: '{deg}° left',
+  sticks,
+  full,
+  ways,
+  sides,
+} as const;
