@@ -1,3 +1,5 @@
+import { couponParts } from '@/lib/aids/coupon';
+import { workshopAids } from '@/lib/aids/workshopAids';
 import { resolve } from '@/lib/airframe/resolve';
 import type { Airframe } from '@/lib/airframe/schema/airframe';
 import { checkBeforeCut } from '@/lib/checks/checkBeforeCut';
@@ -52,6 +54,23 @@ export function freeze(airframe: Airframe): Result<Frozen> {
 
 /** What to print: frozen artefacts as they were released, otherwise computed now. */
 export const artefactsOf = (file: ExportFile): Frozen => file.frozen ?? compute(file.airframe);
+
+/** Materials that foam parts are cut from: what a coupon can tell something of. */
+const foamOf = ({ materials }: Airframe, { parts }: Development) =>
+  materials.filter(
+    ({ id, kind }) => kind !== 'ply' && kind !== 'balsa' && parts.some((part) => part.materialId === id),
+  );
+
+/** Workshop aids for this aircraft and a coupon of each foam sheet, on sheets of their own: they are cut from whatever is left over. */
+export function aidsOf(airframe: Airframe, { figures, development }: Frozen): Frozen {
+  const firstFlightCgXMm = figures.marks.firstFlightCgXMm;
+  const parts = [
+    ...workshopAids({ airframe, parts: development.parts, firstFlightCgXMm }),
+    ...foamOf(airframe, development).flatMap((material) => couponParts(material, material.id, airframe.build)),
+  ];
+  const layout = layOut(parts, stockOf(airframe), LAYOUT_DEFAULTS);
+  return { figures, development: { parts, stockPieces: [], problems: [] }, layout };
+}
 
 /** The plan of a file on a paper by its id. `fonts` reads the fonts where the program does not run from its bundle. */
 export async function planOf(

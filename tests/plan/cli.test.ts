@@ -73,6 +73,20 @@ describe('sheets', () => {
     run(['sheets', file, '--paper', paper, '--out', join(folder, out)]);
   const bytes = (out: string, name: string) => readFileSync(join(folder, out, name));
 
+  it('writes the workshop aids into a folder of their own, with a coupon of each foam sheet, when asked', () => {
+    const { status, stderr } = run(['sheets', EXAMPLE, '--paper', 'a4', '--out', join(folder, 'aided'), '--aids']);
+    expect(status, stderr).toBe(0);
+    const text = textOf(join(folder, 'aided', 'aids', 'plan.pdf'));
+    for (const aid of ['CG stand', 'Throw gauge', 'Incidence gauge', 'coupon'])
+      expect(text.toLowerCase()).toContain(aid.toLowerCase());
+    const ids = (name: string) =>
+      JSON.parse(bytes(join('aided', name), 'manifest.json').toString('utf8')).sheets.flatMap(
+        ({ expected }: { expected: { part: string }[] }) => expected.map(({ part }) => part),
+      );
+    expect(ids('aids').filter((part: string) => part.startsWith('aid/')).length).toBeGreaterThan(10);
+    expect(ids('.').some((part: string) => part.startsWith('aid/'))).toBe(false);
+  });
+
   it('writes the plan, its manifest, and every sheet for a cutter', () => {
     const { status, stdout } = sheets(EXAMPLE, 'a4', 'a4');
     expect(status).toBe(0);

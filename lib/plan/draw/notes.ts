@@ -78,6 +78,8 @@ export function leadingEdge(
   outline: readonly Vec2[],
   turn: (v: Vec2) => Vec2,
 ): { text: string; spots: Spot[] } | null {
+  // A coupon lies on the bench: it has no front.
+  if (part.key.startsWith('aid/coupon/')) return null;
   const { ex, ey } = part.frame;
   const forward: Vec2 = [-ex[0], -ey[0]];
   const upward: Vec2 = [ex[2], ey[2]];

@@ -200,7 +200,7 @@ const file = {
 /** What the command line says. */
 const cli = {
   usageFigures: 'usage: figures FILE.json [--without bodies,propellers]',
-  usageSheets: 'usage: npm run --silent sheets -- FILE.json --paper {papers} --out DIR',
+  usageSheets: 'usage: npm run --silent sheets -- FILE.json --paper {papers} --out DIR [--aids]',
   usage: 'usage: figures FILE.json | sheets FILE.json --paper PAPER --out DIR | job',
   noFile: 'cannot read {file}: {detail}',
   noDirectory: 'cannot write to {directory}: {detail}',
