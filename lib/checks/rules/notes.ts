@@ -67,8 +67,11 @@ function breaksFirst(context: Context, wing: Wing): CheckResult {
   const first = tractor ? breaksTractor : airframe.bodies.length > 0 && pack ? breaksPack : breaksWing;
   const bands = wingJoint(context, wing.resolved.surface.id) === 'bands';
   const element = tractor ?? (first === breaksPack ? pack : undefined);
+  const [nose] = airframe.bodies;
+  const hit = tractor ? `drives.${airframe.drives.indexOf(tractor)}` : first === breaksPack && nose ? 'bodies.0' : null;
   return result('breaks-first', {
     ...base(wing, element ? placeOf(element.id) : (wing.resolved.panels[0]?.root.le ?? wing.tip)),
+    ...(hit === null ? {} : { path: hit, elementId: tractor?.id ?? nose?.id ?? wing.resolved.surface.id }),
     level: 'note',
     words: bands ? `${first}; ${breaksBands}` : first,
     fix: texts.rules['breaks-first'].fix,
