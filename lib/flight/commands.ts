@@ -50,8 +50,19 @@ const eachControl = (airframe: Airframe) =>
     })),
   );
 
+/** A document never changes, so what its sticks do is worked out once for it. */
+const known = new WeakMap<Airframe, ReadonlyMap<string, MixedControl>>();
+
 /** Every control as the sticks move it, by key. Throws RangeError for a document that does not resolve. */
-function mixedControls(airframe: Airframe): Map<string, MixedControl> {
+function mixedControls(airframe: Airframe): ReadonlyMap<string, MixedControl> {
+  const kept = known.get(airframe);
+  if (kept) return kept;
+  const worked = workedOut(airframe);
+  known.set(airframe, worked);
+  return worked;
+}
+
+function workedOut(airframe: Airframe): ReadonlyMap<string, MixedControl> {
   const resolved = resolve(airframe);
   if (!resolved.ok) throw new RangeError('commands are for a document that resolves');
   const { value } = resolved;

@@ -53,7 +53,12 @@ function outlet(context: Context, { drive, hollow }: Cooled, inletMm2: number): 
     at: endCentre(hollow, 'aft'),
     level: outletLevel(ratio),
     words: fill(texts.words.outlet, { has: cm2(has), inlet: cm2(inletMm2), least: mm(least), most: mm(most) }),
-    measured: { value: ratio, quantity: 'none', least, most },
+    measured: {
+      value: has / 100,
+      quantity: 'cm2',
+      least: (least * inletMm2) / 100,
+      most: (most * inletMm2) / 100,
+    },
     fix: fill(texts.rules['cooling-outlet'].fix, { least: cm2(least * inletMm2), most: cm2(most * inletMm2) }),
     basis: COOLING.outletOverInlet.basis,
   });

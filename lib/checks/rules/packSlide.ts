@@ -45,16 +45,16 @@ interface Slide {
   readonly to: number;
 }
 
-function judged(room: Slide, slide: Slide, move: number | null): { level: CheckLevel; words: string; overMm: number } {
+function judged(room: Slide, slide: Slide, move: number | null): { level: CheckLevel; words: string } {
   const range = { from: mm(room.from), to: mm(room.to) };
   const over = (ask: Slide): number => Math.max(room.from - ask.from, ask.to - room.to);
   if (move !== null && over({ from: move, to: move }) > FIT_MM.value) {
     const words = fill(texts.words.slideFirstFlight, { move: mm(move), ...range });
-    return { level: 'bad', words, overMm: over({ from: move, to: move }) };
+    return { level: 'bad', words };
   }
   const values = { fore: mm(-room.from), aft: mm(room.to), from: mm(slide.from), to: mm(slide.to) };
   const overMm = over(slide);
-  return { level: overMm > FIT_MM.value ? 'watch' : 'ok', words: fill(texts.words.slideFits, values), overMm };
+  return { level: overMm > FIT_MM.value ? 'watch' : 'ok', words: fill(texts.words.slideFits, values) };
 }
 
 function slideOf(context: Context, pack: Item, hollow: Hollow, box: Box): CheckResult {
@@ -79,7 +79,7 @@ function slideOf(context: Context, pack: Item, hollow: Hollow, box: Box): CheckR
   const main = mainPacks(context.airframe)?.keys.includes(pack.id) ?? false;
   const move = main ? (context.figures?.packFirstFlightMm ?? null) : null;
   const placeWords = fill(texts.words.slidePlace, { mm: mm(Math.max(0, intoMm)) });
-  const said = clash ? { level: 'bad' as const, words: placeWords, overMm: intoMm } : judged(room, slide, move);
+  const said = clash ? { level: 'bad' as const, words: placeWords } : judged(room, slide, move);
   const from = Math.max(room.from, slide.from);
   const to = Math.min(room.to, slide.to);
   return result('pack-slide', {
@@ -88,7 +88,7 @@ function slideOf(context: Context, pack: Item, hollow: Hollow, box: Box): CheckR
     at: context.placeOf(pack.id),
     level: said.level,
     words: said.words,
-    measured: { value: said.overMm, quantity: 'mm', most: FIT_MM.value },
+    // The words give the reach on both sides; a single number would say less.
     fix: clash ? texts.fixes.packPlace : fill(texts.rules['pack-slide'].fix, { from: mm(from), to: mm(to) }),
     basis: FIT_MM.basis,
   });
